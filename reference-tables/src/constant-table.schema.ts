@@ -44,7 +44,7 @@ export type ElementSymbol = keyof AtomicWeightTable['constants'];
 
 export const ProteinTable = v.strictObject({
   ...head,
-  constants: v.strictObject({ crudeProteinPerNitrogen: Constant }),
+  constants: v.strictObject({ crudeProteinPerNitrogen: Constant, leastProteinOfFeedGradeUrea: Constant }),
 });
 export type ProteinTable = v.InferOutput<typeof ProteinTable>;
 

@@ -6,8 +6,6 @@ import {
 } from '@brimgate/reference-tables/checks';
 import { findFeedstuff } from '@brimgate/reference-tables/feedstuffs';
 import { describe, expect, it } from 'vitest';
-import { NEWEST_EDITION, tablesOf } from '@brimgate/reference-tables';
-import { nutrientRange } from '../src/rations/line-nutrients';
 import { weightedSum } from '../src/rations/weighted-sum';
 import { nutrientNames, type Composition } from '../src/screenings/composition.schema';
 import { parseScreeningRequest } from '../src/screenings/request-problems';
@@ -53,8 +51,8 @@ function fatLeftPctDm(fullFatPctDm: number, { inputs }: MassBalanceFact): number
     { feedstuff: 'grains', sharePctDm: 100 - solublesLeft, composition: { fatPctDm: grainsFat } },
     { feedstuff: 'solubles', sharePctDm: solublesLeft, composition: { fatPctDm: inputs.solublesFatAfterPctDm } },
   ];
-  const ceiling = tablesOf(NEWEST_EDITION).constants.protein.constants.crudeProteinPerNitrogen.value * 100;
-  return weightedSum(lines, ['fatPctDm'], (feed) => nutrientRange(feed, 'fatPctDm', ceiling)).value ?? Number.NaN;
+  const exactly = (fatPctDm: number) => ({ atLeast: fatPctDm, atMost: fatPctDm });
+  return weightedSum(lines, ['fatPctDm'], (feed) => exactly(feed.fatPctDm ?? Number.NaN)).value ?? Number.NaN;
 }
 
 describe('the trade knows the finding (common practice, no source)', () => {

@@ -8,7 +8,7 @@ import { mixedSulfateMgPerL } from '../water/sulfate';
 import { waterSulfurPctDm } from '../water/water-sulfur';
 import { dryMatterIntake } from './intake';
 import { withNetEnergy } from './net-energy';
-import { nutrientRange, roughageNdfRange } from './line-nutrients';
+import { nutrientRange, roughageNdfRange, type ProteinBounds } from './line-nutrients';
 import { weightedSum } from './weighted-sum';
 
 /** The ration summed with its water, each quantity as far as it is known. */
@@ -53,7 +53,7 @@ export function dietOf(request: ScreeningRequest, tables: ReferenceTables): Diet
     drinkingWaterLitresPerDay: water.quantity,
     waterSulfateMgPerL: sulfate,
     waterSulfurPctDm: waterSulfurPctDm(water.quantity, sulfate, intake.quantity, weights),
-    ...nutrientsOf(energetic.lines, proteinCeilingPctDm(tables, weights)),
+    ...nutrientsOf(energetic.lines, proteinBounds(tables, weights)),
   };
   const waters = request.waters?.length ? [] : ['No water was named, so the sulfur of the water is not determined.'];
   return { diet, assumptions: [...intake.assumptions, ...water.assumptions, ...waters, ...energetic.assumptions] };
@@ -64,8 +64,8 @@ type FeedNutrients = Omit<
   'dryMatterIntakeKgPerDay' | 'drinkingWaterLitresPerDay' | 'waterSulfateMgPerL' | 'waterSulfurPctDm'
 >;
 
-function nutrientsOf(lines: readonly RationLineInput[], proteinCeiling: number): FeedNutrients {
-  const sum = (name: NutrientName) => weightedSum(lines, [name], (feed) => nutrientRange(feed, name, proteinCeiling));
+function nutrientsOf(lines: readonly RationLineInput[], protein: ProteinBounds): FeedNutrients {
+  const sum = (name: NutrientName) => weightedSum(lines, [name], (feed) => nutrientRange(feed, name, protein));
   return {
     feedSulfurPctDm: sum('sulfurPctDm'),
     fatPctDm: sum('fatPctDm'),
@@ -86,11 +86,14 @@ function nutrientsOf(lines: readonly RationLineInput[], proteinCeiling: number):
 }
 
 /**
- * Crude protein equivalent of pure urea, above which no feed lies. [% of DM]
+ * What a feed's protein can be at most, and that of urea at least. [% of DM, % of the urea]
  *
- * Nitrogen of urea (iupac-atomic-weights) times the protein factor (constants/protein).
+ * At most that of pure urea: its nitrogen (iupac-atomic-weights) times the protein factor. Both from constants/protein.
  */
-export function proteinCeilingPctDm(tables: ReferenceTables, weights: AtomicWeights): number {
-  const factor = tables.constants.protein.constants.crudeProteinPerNitrogen.value;
-  return 100 * elementShareOfCompound('N', UREA, weights) * factor;
+function proteinBounds(tables: ReferenceTables, weights: AtomicWeights): ProteinBounds {
+  const { crudeProteinPerNitrogen, leastProteinOfFeedGradeUrea } = tables.constants.protein.constants;
+  return {
+    ceilingPctDm: 100 * elementShareOfCompound('N', UREA, weights) * crudeProteinPerNitrogen.value,
+    leastPctOfUrea: leastProteinOfFeedGradeUrea.value,
+  };
 }

@@ -4,8 +4,13 @@ import type { Range } from '../quantities/bounded-quantity';
 const NONE: Range = { atLeast: 0, atMost: 0 };
 const exact = (value: number): Range => ({ atLeast: value, atMost: value });
 
-/** The most crude protein a feed can hold: that of pure urea. [% of DM] */
-export type ProteinCeilingPctDm = number;
+/** What bounds the protein of a feed where its figure is missing. */
+export interface ProteinBounds {
+  /** The most crude protein a feed can hold: that of pure urea. [% of DM] */
+  readonly ceilingPctDm: number;
+  /** The least that urea sold as feed counts as. [% of the urea] */
+  readonly leastPctOfUrea: number;
+}
 
 /**
  * What a feedstuff's composition says of one nutrient, as a range that is a single number when the figure is there.
@@ -13,17 +18,17 @@ export type ProteinCeilingPctDm = number;
  * Where the figure is absent the range follows from what must hold: a part is no larger than its whole, urea is
  * non-protein nitrogen, added fat is fat. So feed without non-protein nitrogen holds no urea, by definition.
  */
-export function nutrientRange(feed: Composition, nutrient: NutrientName, proteinCeiling: ProteinCeilingPctDm): Range {
+export function nutrientRange(feed: Composition, nutrient: NutrientName, protein: ProteinBounds): Range {
   const known = feed[nutrient];
   if (known !== undefined) return exact(known);
   switch (nutrient) {
     case 'crudeProteinPctDm':
       return {
-        atLeast: feed.npnProteinEquivalentPctDm ?? npnRange(feed, proteinCeiling).atLeast,
-        atMost: proteinCeiling,
+        atLeast: feed.npnProteinEquivalentPctDm ?? npnRange(feed, protein).atLeast,
+        atMost: protein.ceilingPctDm,
       };
     case 'npnProteinEquivalentPctDm':
-      return npnRange(feed, proteinCeiling);
+      return npnRange(feed, protein);
     case 'ureaPctDm':
       return feed.npnProteinEquivalentPctDm === 0 || feed.crudeProteinPctDm === 0 ? NONE : { atLeast: 0, atMost: 100 };
     case 'fatPctDm':
@@ -37,12 +42,9 @@ export function nutrientRange(feed: Composition, nutrient: NutrientName, protein
   }
 }
 
-// Feed-grade urea of the lowest nitrogen sold, 42 %, counts as 262 % crude protein (mu-urea-supplements-1993).
-const LEAST_PROTEIN_PCT_OF_UREA = 262;
-
-function npnRange(feed: Composition, proteinCeiling: number): Range {
-  const atMost = feed.crudeProteinPctDm ?? proteinCeiling;
-  const ofUrea = ((feed.ureaPctDm ?? 0) * LEAST_PROTEIN_PCT_OF_UREA) / 100;
+function npnRange(feed: Composition, protein: ProteinBounds): Range {
+  const atMost = feed.crudeProteinPctDm ?? protein.ceilingPctDm;
+  const ofUrea = ((feed.ureaPctDm ?? 0) * protein.leastPctOfUrea) / 100;
   return { atLeast: Math.min(ofUrea, atMost), atMost };
 }
 
