@@ -1,0 +1,35 @@
+import { tableMigration } from '../migration';
+
+export const { up, down } = tableMigration(
+  'screenings',
+  `
+    id BIGINT NOT NULL AUTO_INCREMENT PRIMARY KEY,
+    firm_id BIGINT NOT NULL,
+    uuid CHAR(36) NOT NULL,
+    yard_id BIGINT NOT NULL,
+    ration_id BIGINT NOT NULL,
+    ration_version_id BIGINT NOT NULL,
+    version_number INT NOT NULL,
+    request_id BIGINT NOT NULL,
+    content_hash CHAR(64) NOT NULL,
+    follows_id BIGINT NULL,
+    rules_version VARCHAR(20) NOT NULL,
+    edition VARCHAR(20) NOT NULL,
+    verdict VARCHAR(16) NOT NULL,
+    sign_off VARCHAR(16) NOT NULL,
+    sulfur_pct_dm DOUBLE NULL,
+    headline VARCHAR(1000) NOT NULL,
+    screening JSON NOT NULL,
+    screened_by_id BIGINT NOT NULL,
+    screened_by_name VARCHAR(120) NOT NULL,
+    screened_at DATETIME(3) NOT NULL,
+    UNIQUE KEY screenings_of_firm (firm_id, id),
+    UNIQUE KEY screenings_uuid (uuid),
+    CONSTRAINT screenings_yard FOREIGN KEY (firm_id, yard_id) REFERENCES yards (firm_id, id),
+    CONSTRAINT screenings_ration FOREIGN KEY (firm_id, ration_id) REFERENCES rations (firm_id, id),
+    CONSTRAINT screenings_ration_version FOREIGN KEY (firm_id, ration_version_id) REFERENCES ration_versions (firm_id, id),
+    CONSTRAINT screenings_request FOREIGN KEY (firm_id, request_id) REFERENCES screening_requests (firm_id, id),
+    CONSTRAINT screenings_follows FOREIGN KEY (firm_id, follows_id) REFERENCES screenings (firm_id, id),
+    CONSTRAINT screenings_screened_by FOREIGN KEY (screened_by_id) REFERENCES people (id)
+`,
+);

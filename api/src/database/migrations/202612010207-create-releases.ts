@@ -1,0 +1,36 @@
+import { tableMigration } from '../migration';
+
+export const { up, down } = tableMigration(
+  'releases',
+  `
+    id BIGINT NOT NULL AUTO_INCREMENT PRIMARY KEY,
+    firm_id BIGINT NOT NULL,
+    uuid CHAR(36) NOT NULL,
+    yard_id BIGINT NOT NULL,
+    ration_id BIGINT NOT NULL,
+    ration_version_id BIGINT NOT NULL,
+    version_number INT NOT NULL,
+    screening_id BIGINT NOT NULL,
+    content_hash CHAR(64) NOT NULL,
+    state VARCHAR(16) NOT NULL,
+    reason TEXT NULL,
+    fed_lines JSON NOT NULL,
+    released_by_id BIGINT NOT NULL,
+    released_by_name VARCHAR(120) NOT NULL,
+    released_at DATETIME(3) NOT NULL,
+    stopped_by_id BIGINT NULL,
+    stopped_by_name VARCHAR(120) NULL,
+    stopped_at DATETIME(3) NULL,
+    stop_reason TEXT NULL,
+    UNIQUE KEY releases_of_firm (firm_id, id),
+    UNIQUE KEY releases_uuid (uuid),
+    UNIQUE KEY releases_of_version (firm_id, ration_version_id),
+    KEY releases_newest (firm_id, released_at, id),
+    CONSTRAINT releases_yard FOREIGN KEY (firm_id, yard_id) REFERENCES yards (firm_id, id),
+    CONSTRAINT releases_ration FOREIGN KEY (firm_id, ration_id) REFERENCES rations (firm_id, id),
+    CONSTRAINT releases_ration_version FOREIGN KEY (firm_id, ration_version_id) REFERENCES ration_versions (firm_id, id),
+    CONSTRAINT releases_screening FOREIGN KEY (firm_id, screening_id) REFERENCES screenings (firm_id, id),
+    CONSTRAINT releases_released_by FOREIGN KEY (released_by_id) REFERENCES people (id),
+    CONSTRAINT releases_stopped_by FOREIGN KEY (stopped_by_id) REFERENCES people (id)
+`,
+);

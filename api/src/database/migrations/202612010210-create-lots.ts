@@ -1,0 +1,35 @@
+import { tableMigration } from '../migration';
+
+export const { up, down } = tableMigration(
+  'lots',
+  `
+    id BIGINT NOT NULL AUTO_INCREMENT PRIMARY KEY,
+    firm_id BIGINT NOT NULL,
+    uuid CHAR(36) NOT NULL,
+    yard_id BIGINT NOT NULL,
+    name VARCHAR(120) NOT NULL,
+    head INT NOT NULL,
+    started_on DATE NOT NULL,
+    ended_on DATE NULL,
+    entry_weight_kg DOUBLE NOT NULL,
+    exit_weight_kg DOUBLE NULL,
+    weight_basis VARCHAR(8) NOT NULL,
+    dry_matter_intake_kg_per_day DOUBLE NULL,
+    release_id BIGINT NULL,
+    excretion JSON NOT NULL,
+    is_determined BOOLEAN NOT NULL,
+    rules_version VARCHAR(20) NOT NULL,
+    edition VARCHAR(20) NOT NULL,
+    version INT NOT NULL,
+    saved_by_id BIGINT NOT NULL,
+    saved_by_name VARCHAR(120) NOT NULL,
+    saved_at DATETIME(3) NOT NULL,
+    UNIQUE KEY lots_of_firm (firm_id, id),
+    UNIQUE KEY lots_uuid (uuid),
+    KEY lots_newest (firm_id, started_on, id),
+    KEY lots_ended (firm_id, yard_id, ended_on, id),
+    CONSTRAINT lots_yard FOREIGN KEY (firm_id, yard_id) REFERENCES yards (firm_id, id),
+    CONSTRAINT lots_release FOREIGN KEY (firm_id, release_id) REFERENCES releases (firm_id, id),
+    CONSTRAINT lots_saved_by FOREIGN KEY (saved_by_id) REFERENCES people (id)
+`,
+);
