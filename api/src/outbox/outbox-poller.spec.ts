@@ -1,3 +1,4 @@
+import { Logger } from '@nestjs/common';
 import { env } from '../config/env';
 import { OutboxPoller } from './outbox-poller.service';
 import type { OutboxSender } from './outbox-sender.service';
@@ -51,7 +52,8 @@ describe('looking for due mail', () => {
     expect(looks()).toBe(1);
   });
 
-  it('goes on after a look that failed', async () => {
+  it('goes on after a look that failed, and says so in the log', async () => {
+    const warn = jest.spyOn(Logger.prototype, 'warn').mockImplementation(() => undefined);
     let looks = 0;
     const sender = {
       sendDue: () => {
@@ -64,6 +66,8 @@ describe('looking for due mail', () => {
     await jest.advanceTimersByTimeAsync(env.OUTBOX_POLL_MS);
     await jest.advanceTimersByTimeAsync(env.OUTBOX_POLL_MS);
     expect(looks).toBe(2);
+    expect(warn).toHaveBeenCalledWith('Looking for due mail failed: The database is away');
+    warn.mockRestore();
     await poller.beforeApplicationShutdown();
   });
 });
