@@ -1,6 +1,5 @@
 import { BelongsTo, Column, DataType, ForeignKey, Model, Table } from 'sequelize-typescript';
 import { YardModel } from '../yards/yard.model';
-import { MembershipModel } from './membership.model';
 
 /** A yard a membership is assigned to. */
 @Table({ tableName: 'membership_yards' })
@@ -8,7 +7,6 @@ export class MembershipYardModel extends Model {
   @Column({ type: DataType.BIGINT, primaryKey: true })
   declare firmId: number;
 
-  @ForeignKey(() => MembershipModel)
   @Column({ type: DataType.BIGINT, primaryKey: true })
   declare membershipId: number;
 

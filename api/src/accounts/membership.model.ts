@@ -37,6 +37,10 @@ export class MembershipModel extends Model {
   @BelongsTo(() => PersonModel)
   declare person: PersonModel;
 
-  @BelongsToMany(() => YardModel, () => MembershipYardModel)
+  @BelongsToMany(() => YardModel, {
+    through: () => MembershipYardModel,
+    foreignKey: 'membershipId',
+    otherKey: 'yardId',
+  })
   declare yards: YardModel[];
 }
