@@ -34,7 +34,7 @@ export function ProvenanceTag({ status, locator, source, of }: ProvenanceTagProp
   return (
     <Popover.Root>
       <Popover.Trigger>
-        <button type="button" className={`${styles.tag} no-print`}>
+        <button type="button" className={styles.tag}>
           {provenanceWords[status]}
           {of && <span className="visually-hidden">: where the {of} comes from</span>}
         </button>

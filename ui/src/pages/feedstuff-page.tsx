@@ -6,6 +6,7 @@ import { Loading } from '../components/loading';
 import { Page } from '../components/page';
 import { ProblemNotice } from '../components/problem-notice';
 import { useToast } from '../components/toast';
+import { FeedingValueNotes } from '../features/feedstuffs/feeding-value-notes';
 import { FeedstuffFigures } from '../features/feedstuffs/feedstuff-figures';
 import { FeedstuffForm } from '../features/feedstuffs/feedstuff-form';
 import { FeedstuffNotes } from '../features/feedstuffs/feedstuff-notes';
@@ -51,6 +52,7 @@ export default function FeedstuffPage() {
         <>
           <FeedstuffFigures feedstuff={feedstuff.data} />
           <FeedstuffNotes feedstuff={feedstuff.data} />
+          <FeedingValueNotes feedstuff={feedstuff.data} />
         </>
       )}
     </Page>

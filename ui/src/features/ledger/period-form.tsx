@@ -16,7 +16,10 @@ export function PeriodForm({ yards, period, onChoose }: PeriodFormProps) {
   const handleSubmit = (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault();
     const chosen = new FormData(event.currentTarget);
-    const text = (name: string) => String(chosen.get(name) ?? '');
+    const text = (name: string) => {
+      const typed = chosen.get(name);
+      return typeof typed === 'string' ? typed : '';
+    };
     onChoose({ yard: text('yard'), from: text('from'), to: text('to') });
   };
   const faultOf = (path: string) => period.faults.find((fault) => fault.path === path)?.message;
