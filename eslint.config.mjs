@@ -81,6 +81,10 @@ export default tseslint.config(
     rules: { 'no-restricted-properties': ['error', ...noFocusedTests] },
   },
   {
+    files: ['ui/public/**/*.js'],
+    languageOptions: { globals: globals.browser },
+  },
+  {
     files: ['api/src/config/**', 'ui/e2e/**', 'api/test/**', 'api/jest.config.*', '**/*.config.*'],
     rules: { 'no-restricted-properties': ['error', ...noFocusedTests] },
   },
