@@ -162,9 +162,9 @@ async function readMail(): Promise<void> {
     expect(part).toMatch(/nutrient-management rules/i);
     expect(part).not.toMatch(/\bsafe\b/i);
   }
-  // 60 % of 10 kg is 6 kg of dry matter; at 88 % dry matter 6.818 kg as fed.
-  expect(text).toContain(`${story.corn}: 60 % of dry matter; as fed 6.818`);
-  expect(text).toContain('Value 0.426, limit 0.3 % of DM');
+  // 60 % of 10 kg is 6 kg of dry matter; at 88 % dry matter 6.8 kg as fed.
+  expect(text).toContain(`${story.corn}: 6.8 kg as fed (60 % of dry matter)`);
+  expect(text).toContain('Value 0.43 % of DM, limit 0.3 % of DM');
 }
 
 const acknowledge = (browser: Browser) =>

@@ -22,6 +22,11 @@ export function formatNumber(value: number | null | undefined, decimals: number)
   return /^-[0.,]*$/.test(text) ? text.slice(1) : text;
 }
 
+const asEntered = new Intl.NumberFormat(LOCALE, { maximumFractionDigits: 12 });
+
+/** `1,150.5` of 1150.5: thousands apart, decimals neither added nor taken away. */
+export const formatAsEntered = (value: number): string => asEntered.format(value);
+
 /** `0.43 % of DM`; a unit that is empty is left out. */
 export function formatWithUnit(value: number | null | undefined, decimals: number, unit: string): string {
   const number = formatNumber(value, decimals);

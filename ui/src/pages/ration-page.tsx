@@ -11,13 +11,10 @@ import { RationStanding } from '../features/rations/ration-standing';
 import { rationQuery } from '../features/rations/rations.queries';
 import { VersionList } from '../features/rations/version-list';
 import { GateList } from '../features/releases/gate-list';
-import { Assumptions } from '../features/screenings/assumptions';
-import { CautionsList } from '../features/screenings/cautions-list';
 import { ExcretionTable } from '../features/screenings/excretion-table';
-import { FindingsList } from '../features/screenings/findings-list';
 import { Headroom, headroomAside } from '../features/screenings/headroom';
+import { ScreeningWords } from '../features/screenings/screening-words';
 import { SulfurContributors } from '../features/screenings/sulfur-contributors';
-import { TotalsTable } from '../features/screenings/totals-table';
 import { VerdictLine } from '../features/screenings/verdict-line';
 import { waterSourcesQuery } from '../features/water/water.queries';
 import { yardQuery } from '../features/yards/yards.queries';
@@ -90,24 +87,7 @@ const slots: RationSlots = {
       </Section>
     </>
   ),
-  findings: ({ screening }) => (
-    <div className={styles.columns}>
-      <Section title="Findings">
-        <FindingsList screening={screening} />
-      </Section>
-      <div>
-        <Section title="Keep in mind">
-          <CautionsList screening={screening} />
-        </Section>
-        <Section title="What is assumed">
-          <Assumptions screening={screening} />
-        </Section>
-        <Section title="Totals">
-          <TotalsTable totals={screening.totals} />
-        </Section>
-      </div>
-    </div>
-  ),
+  findings: ({ screening }) => <ScreeningWords screening={screening} />,
 };
 
 /** Where it stands beside what is still missing before release. */

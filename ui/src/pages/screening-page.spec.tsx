@@ -35,7 +35,7 @@ describe('a stored screening', () => {
     row.focus();
     await userEvent.keyboard('{Enter}');
     const detail = await screen.findByRole('dialog', { name: 'Total sulfur' });
-    expect(detail).toHaveTextContent('drinking water');
+    expect(detail).toHaveTextContent('Drinking water');
     expect(detail).toHaveTextContent('Limit 0.30 % of DM, published');
     await userEvent.keyboard('{Escape}');
     expect(screen.queryByRole('dialog')).not.toBeInTheDocument();
@@ -56,7 +56,7 @@ describe('a stored screening', () => {
     open(salty);
     const table = await screen.findByRole('table', { name: 'Sulfur by feedstuff and water', hidden: true });
     expect(
-      within(table).getByRole('rowheader', { name: 'drinking water', hidden: true }).closest('tr'),
+      within(table).getByRole('rowheader', { name: 'Drinking water', hidden: true }).closest('tr'),
     ).toHaveTextContent('0.240');
     // 0.20 of the feed and 0.2403 of the water
     expect(table.querySelector('tfoot')).toHaveTextContent('0.440');

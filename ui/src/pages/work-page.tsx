@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
-import type { WorkItem } from '@brimgate/rules';
+import type { Role, WorkItem } from '@brimgate/rules';
 import { LinkButton } from '../components/button';
 import { EmptyState } from '../components/empty-state';
 import { Loading } from '../components/loading';
@@ -58,8 +58,22 @@ function WorkActions() {
   return null;
 }
 
+/** Where one looks when nothing waits. */
+const nextSteps: Readonly<Record<Role, { to: string; label: string }>> = {
+  nutritionist: { to: paths.rations(), label: 'See the rations' },
+  veterinarian: { to: paths.rations(), label: 'See what is fed' },
+  compliance: { to: paths.ledger(), label: 'Open the ledger' },
+  'yard-manager': { to: paths.advisories(), label: 'Read the advisories' },
+  administrator: { to: paths.yards(), label: 'Look after the yards' },
+};
+
 function NothingWaits() {
   const { membership } = useSession();
   const { title, next } = emptyWords[membership.role];
-  return <EmptyState title={title}>{next}</EmptyState>;
+  const { to, label } = nextSteps[membership.role];
+  return (
+    <EmptyState title={title} action={<LinkButton to={to}>{label}</LinkButton>}>
+      {next}
+    </EmptyState>
+  );
 }

@@ -8,7 +8,7 @@ const at = (instant: string): AuditEventView => ({
   person: 'N. Example',
   role: 'nutritionist',
   act: 'ration-released',
-  sentence: 'N. Example released Finisher 4, version 6',
+  sentence: 'Released version 6 of Finisher 4 to Dry Fork',
   subject: { kind: 'ration', id: '1', name: 'Finisher 4' },
   yard: 'Dry Fork',
   changes: [],

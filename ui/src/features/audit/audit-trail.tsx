@@ -45,14 +45,23 @@ function AuditEvent({ event, subjectPath }: { event: AuditEventView } & Pick<Aud
       </p>
       {event.changes.length > 0 && (
         <ul className={styles.changes}>
-          {event.changes.map((change) => (
-            <li key={change.field}>
-              {change.field}: <del>{change.before ?? 'empty'}</del> <span aria-hidden="true">→</span>{' '}
-              <ins>{change.after ?? 'empty'}</ins>
+          {event.changes.map((change, index) => (
+            <li key={index}>
+              <AuditChange change={change} />
             </li>
           ))}
         </ul>
       )}
     </div>
+  );
+}
+
+/** What was told beside the act has nothing before it; what changed has both. */
+function AuditChange({ change: { field, before, after } }: { change: AuditEventView['changes'][number] }) {
+  if (before === null) return `${field}: ${after ?? 'none'}`;
+  return (
+    <>
+      {field}: <del>{before}</del> <span aria-hidden="true">→</span> <ins>{after ?? 'none'}</ins>
+    </>
   );
 }

@@ -1,6 +1,7 @@
 import { useSearchParams } from 'react-router-dom';
 import { SelectField } from '../../components/select-field';
 import { TextField } from '../../components/text-field';
+import { categoryTitle } from '../../lib/feedstuff-category';
 import type { FeedstuffFilter } from './feedstuff-filter';
 import styles from './feedstuff-filters.module.css';
 
@@ -47,7 +48,7 @@ export function FeedstuffFilters({ categories }: { categories: readonly string[]
       <SelectField
         label="Category"
         emptyLabel="All categories"
-        options={categories.map((category) => ({ value: category, label: category }))}
+        options={categories.map((category) => ({ value: category, label: categoryTitle(category) }))}
         value={filter.category}
         onChange={(event) => set('category', event.target.value)}
       />

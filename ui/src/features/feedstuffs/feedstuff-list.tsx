@@ -2,6 +2,7 @@ import type { FeedstuffListItem, NutrientName } from '@brimgate/rules';
 import { Link } from 'react-router-dom';
 import { type Column, DataTable } from '../../components/data-table';
 import { provenanceWords } from '../../components/provenance-tag';
+import { categoryTitle } from '../../lib/feedstuff-category';
 import { formatNumber } from '../../lib/format';
 import { paths } from '../../paths';
 import styles from './feedstuff-list.module.css';
@@ -22,13 +23,13 @@ const columns: Column<FeedstuffListItem>[] = [
     header: 'Feedstuff',
     isRowHeader: true,
     cell: (feedstuff) => (
-      <span>
+      <span className={styles.name}>
         <Link to={paths.feedstuff(feedstuff.id)}>{feedstuff.name}</Link>
         <span className={styles.composition}>{feedstuff.compositionLabel}</span>
       </span>
     ),
   },
-  { key: 'category', header: 'Category', cell: ({ category }) => category },
+  { key: 'category', header: 'Category', cell: ({ category }) => categoryTitle(category) },
   ...KEY_FIGURES.map((name) => ({
     key: name,
     header: nutrients[name].label,
@@ -45,6 +46,7 @@ export function FeedstuffList({ feedstuffs }: { feedstuffs: readonly FeedstuffLi
       columns={columns}
       rows={feedstuffs}
       rowKey={(feedstuff) => feedstuff.id}
+      whenNarrow="scroll"
     />
   );
 }

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { asFedKgPerDay, lineSulfurPctDm, sumOfKnown } from './line-figures';
+import { asFedKgPerDay, lineSulfurPctDm, sumOfKnown, decimalsOfShares } from './line-figures';
 
 describe('what one line weighs as fed', () => {
   it('adds the moisture of the feedstuff', () => {
@@ -31,4 +31,19 @@ describe('the sulfur that one line brings', () => {
 it('sums to not known as soon as one part is not known', () => {
   expect(sumOfKnown([1, 2.5])).toBe(3.5);
   expect(sumOfKnown([1, null])).toBeNull();
+});
+
+describe('decimals of the column of shares', () => {
+  it('is one when whole numbers were typed', () => {
+    expect(decimalsOfShares(['52', '48'])).toBe(1);
+  });
+
+  it('is that of the most exact share, with comma or point', () => {
+    expect(decimalsOfShares(['52', '3,25', '44.75'])).toBe(2);
+  });
+
+  it('is never more than a share may have, and one for an empty sheet', () => {
+    expect(decimalsOfShares(['3.1415'])).toBe(2);
+    expect(decimalsOfShares([])).toBe(1);
+  });
 });

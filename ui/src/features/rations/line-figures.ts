@@ -35,3 +35,11 @@ export function sumOfKnown(parts: readonly (number | null)[]): number | null {
   }
   return sum;
 }
+
+const MOST_SHARE_DECIMALS = 2;
+
+/** As many decimals as the most exact share has been typed with, at least one: 52.0 above 100.0. */
+export function decimalsOfShares(typed: readonly string[]): number {
+  const decimals = typed.map((text) => /[.,](\d+)\s*$/.exec(text)?.[1]?.length ?? 0);
+  return Math.min(MOST_SHARE_DECIMALS, Math.max(1, ...decimals));
+}

@@ -23,6 +23,8 @@ interface LineRowProps {
   feedstuffOf: (id: string) => FeedstuffListItem | undefined;
   dryMatterIntakeKgPerDay: number | null;
   canEdit: boolean;
+  /** How many decimals the column of shares shows where nothing is typed. */
+  shareDecimals: number;
   isNew: boolean;
   feedstuffFault: string | undefined;
   shareFault: string | undefined;
@@ -34,7 +36,8 @@ interface LineRowProps {
 const focusShare = (index: number) => document.getElementById(fieldId(`lines.${index}.sharePctDm`))?.focus();
 
 export function LineRow(props: LineRowProps) {
-  const { form, index, count, feedstuffOf, dryMatterIntakeKgPerDay, canEdit, shareFault, onNextLine } = props;
+  const { form, index, count, feedstuffOf, dryMatterIntakeKgPerDay, canEdit, shareDecimals, shareFault, onNextLine } =
+    props;
   const line = useWatch({ control: form.control, name: `lines.${index}` });
   const feedstuff = feedstuffOf(line.feedstuffId);
   const share = numberFromText(line.sharePctDm);
@@ -54,12 +57,10 @@ export function LineRow(props: LineRowProps) {
 
   return (
     <tr {...sheetRole('row')}>
-      <th scope="row" {...sheetRole('rowheader')} className={styles.feedstuff}>
+      <th scope="row" {...sheetRole('rowheader')} className={styles.feedstuff} aria-label={feedstuff?.name}>
         <FeedstuffCell {...props} feedstuffId={line.feedstuffId} feedstuff={feedstuff} />
-      </th>
-      <td {...sheetRole('cell')} className={styles.composition}>
         {feedstuff && <CompositionNote feedstuff={feedstuff} />}
-      </td>
+      </th>
       <td {...sheetRole('cell')} className={`${styles.number} ${styles.share}`}>
         {canEdit ? (
           <NumberField
@@ -70,7 +71,7 @@ export function LineRow(props: LineRowProps) {
             onKeyDown={handleKeyDown}
           />
         ) : (
-          line.sharePctDm
+          <Known value={share ?? null} decimals={shareDecimals} />
         )}
       </td>
       <td {...sheetRole('cell')} className={`${styles.number} ${styles.asFed}`}>

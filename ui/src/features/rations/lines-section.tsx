@@ -1,8 +1,10 @@
 import type { FeedstuffListItem } from '@brimgate/rules';
 import { type ClipboardEvent, memo, useMemo, useState } from 'react';
-import { type Control, useFieldArray, type UseFormReturn } from 'react-hook-form';
+import { type Control, useFieldArray, type UseFormReturn, useWatch } from 'react-hook-form';
 import { Button } from '../../components/button';
 import { Section } from '../../components/section';
+import { categoryTitle } from '../../lib/feedstuff-category';
+import { decimalsOfShares } from './line-figures';
 import { LineRow } from './line-row';
 import styles from './lines-section.module.css';
 import { LinesTotal } from './lines-total';
@@ -20,6 +22,12 @@ interface LinesSectionProps {
 
 const MOST_LINES = 60;
 
+const optionOf = ({ id, name, category, origin }: FeedstuffListItem) => ({
+  value: id,
+  label: name,
+  detail: origin === 'firm' ? 'own feedstuff' : categoryTitle(category),
+});
+
 /** The sheet of what is fed: one line a feedstuff, its share and what it brings; the sum below. */
 export const LinesSection = memo(function LinesSection({
   form,
@@ -30,18 +38,11 @@ export const LinesSection = memo(function LinesSection({
 }: LinesSectionProps) {
   const { control } = form;
   const lines = useFieldArray({ control: control as Control<RationValues>, name: 'lines' });
+  const shareDecimals = decimalsOfShares(useWatch({ control, name: 'lines' }).map((line) => line.sharePctDm));
   const [pasted, setPasted] = useState<string | null>(null);
   const [newLineId, setNewLineId] = useState<string | null>(null);
   const byId = useMemo(() => new Map(feedstuffs.map((feedstuff) => [feedstuff.id, feedstuff])), [feedstuffs]);
-  const options = useMemo(
-    () =>
-      feedstuffs.map(({ id, name, category, origin }) => ({
-        value: id,
-        label: name,
-        detail: origin === 'firm' ? 'own feedstuff' : category,
-      })),
-    [feedstuffs],
-  );
+  const options = useMemo(() => feedstuffs.map(optionOf), [feedstuffs]);
   const isFull = lines.fields.length >= MOST_LINES;
 
   const handleAdd = () => {
@@ -58,17 +59,18 @@ export const LinesSection = memo(function LinesSection({
 
   return (
     <Section title="What is fed" aside="% of dry matter">
-      <table className={styles.sheet} {...sheetRole('table')} onPaste={handlePaste}>
+      <table
+        className={canEdit ? `${styles.sheet} ${styles.editable}` : styles.sheet}
+        {...sheetRole('table')}
+        onPaste={handlePaste}
+      >
         <caption className="visually-hidden">
           Lines of the ration: feedstuff, share of dry matter, and what it brings
         </caption>
         <thead {...sheetRole('rowgroup')}>
           <tr {...sheetRole('row')}>
             <th scope="col" {...sheetRole('columnheader')}>
-              Feedstuff
-            </th>
-            <th scope="col" {...sheetRole('columnheader')}>
-              Composition
+              Feedstuff and composition
             </th>
             <th scope="col" {...sheetRole('columnheader')} className={styles.number}>
               Share, % of DM
@@ -97,6 +99,7 @@ export const LinesSection = memo(function LinesSection({
               feedstuffOf={(id) => byId.get(id)}
               dryMatterIntakeKgPerDay={dryMatterIntakeKgPerDay}
               canEdit={canEdit}
+              shareDecimals={shareDecimals}
               isNew={newLineId === 'last' && index === lines.fields.length - 1}
               feedstuffFault={faultAt(`lines.${index}.feedstuffId`)}
               shareFault={faultAt(`lines.${index}.sharePctDm`)}
@@ -111,6 +114,7 @@ export const LinesSection = memo(function LinesSection({
           feedstuffOf={(id) => byId.get(id)}
           dryMatterIntakeKgPerDay={dryMatterIntakeKgPerDay}
           canEdit={canEdit}
+          shareDecimals={shareDecimals}
           fault={faultAt('lines')}
         />
       </table>

@@ -15,13 +15,22 @@ interface LinesTotalProps {
   feedstuffOf: (id: string) => FeedstuffListItem | undefined;
   dryMatterIntakeKgPerDay: number | null;
   canEdit: boolean;
+  shareDecimals: number;
   fault: string | undefined;
 }
 
+/** What is missing to 100 is told to the last decimal that a share may have. */
 const SHARE_DECIMALS = 2;
 
 /** The sum of the sheet; while it misses 100 it says by how much. */
-export function LinesTotal({ control, feedstuffOf, dryMatterIntakeKgPerDay, canEdit, fault }: LinesTotalProps) {
+export function LinesTotal({
+  control,
+  feedstuffOf,
+  dryMatterIntakeKgPerDay,
+  canEdit,
+  shareDecimals,
+  fault,
+}: LinesTotalProps) {
   const lines = useWatch({ control, name: 'lines' });
   const sum = typedSum(lines.map((line) => line.sharePctDm));
   const compositions = lines.map((line) => ({
@@ -38,9 +47,8 @@ export function LinesTotal({ control, feedstuffOf, dryMatterIntakeKgPerDay, canE
         <th scope="row" {...sheetRole('rowheader')} className={styles.feedstuff}>
           Ration
         </th>
-        <td {...sheetRole('cell')} className={styles.composition} />
         <td {...sheetRole('cell')} className={`${styles.number} ${styles.share}`} id={fieldId('lines')} tabIndex={-1}>
-          {formatNumber(sum, SHARE_DECIMALS)}
+          {formatNumber(sum, shareDecimals)}
         </td>
         <td {...sheetRole('cell')} className={`${styles.number} ${styles.asFed}`}>
           <Known value={lines.length === 0 ? null : asFed} decimals={2} />
@@ -51,7 +59,7 @@ export function LinesTotal({ control, feedstuffOf, dryMatterIntakeKgPerDay, canE
         {canEdit && <td {...sheetRole('cell')} className={`${styles.acts} no-print`} />}
       </tr>
       <tr {...sheetRole('row')} className={styles.missingRow}>
-        <td {...sheetRole('cell')} colSpan={canEdit ? 6 : 5}>
+        <td {...sheetRole('cell')} colSpan={canEdit ? 5 : 4}>
           <span role="status" className={fault ? styles.fault : undefined}>
             {lines.length > 0 && missing(sum)}
           </span>

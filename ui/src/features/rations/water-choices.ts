@@ -1,11 +1,11 @@
 import type { WaterAnalysisView, WaterSourceView } from '@brimgate/rules';
-import { formatDate } from '../../lib/format';
+import { formatAsEntered, formatDate, THIN_SPACE } from '../../lib/format';
 
 export interface WaterChoice {
   analysis: WaterAnalysisView;
   /** "North well, trough 3" */
   name: string;
-  /** "640 mg/L SO4" as the laboratory printed it; "sulfate not analysed". */
+  /** "sulfate 1,640 mg/L as SO4" as the laboratory printed it; "sulfate not analysed". */
   sulfate: string;
   /** Everything in one line, for the list. */
   label: string;
@@ -15,7 +15,7 @@ export interface WaterChoice {
 export function sulfateAsEntered(analysis: Pick<WaterAnalysisView, 'sulfate'>): string {
   const { sulfate } = analysis;
   if (!sulfate) return 'sulfate not analysed';
-  return `sulfate ${sulfate.qualifier ?? ''}${sulfate.value} ${sulfate.unit} as ${sulfate.as}`;
+  return `sulfate ${sulfate.qualifier ?? ''}${formatAsEntered(sulfate.value)}${THIN_SPACE}${sulfate.unit} as ${sulfate.as}`;
 }
 
 /** Every analysis of the yard's waters that a ration can go with, newest first within each water. */

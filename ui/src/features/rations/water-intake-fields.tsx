@@ -19,6 +19,15 @@ const kinds: readonly { value: WaterIntakeKind; label: string }[] = [
   { value: 'arias-mader-2011-2', label: 'Equation by sunlight and heat index' },
 ];
 
+/** The same for those who only read. */
+const readKinds: Readonly<Record<WaterIntakeKind, string>> = {
+  unknown: 'not known',
+  metered: 'metered',
+  'nrc-winchester-morris-table': 'from a table by weight and temperature',
+  'arias-mader-2011-1': 'from an equation by sunlight and lowest temperature',
+  'arias-mader-2011-2': 'from an equation by sunlight and heat index',
+};
+
 const cattleClasses = [
   { value: 'growing', label: 'Growing' },
   { value: 'finishing', label: 'Finishing' },
@@ -30,7 +39,7 @@ const cattleClasses = [
 /** How much is drunk, as measured or by a published estimate. Not known stays not known. */
 export function WaterIntakeFields({ form, canEdit, faultAt }: WaterIntakeFieldsProps) {
   const kind = useWatch({ control: form.control, name: 'waterIntake.kind' });
-  if (!canEdit) return <p>Water intake: {kinds.find(({ value }) => value === kind)?.label.toLowerCase()}.</p>;
+  if (!canEdit) return <p className={styles.intake}>Water intake: {readKinds[kind]}.</p>;
   const number = (key: keyof WaterIntakeText, label: string, unit: string, hint?: string) => (
     <NumberField
       {...form.register(`waterIntake.${key}`)}

@@ -102,13 +102,12 @@ function WaterRow({ form, index, count, choices, canEdit, faultAt, onRemove }: W
   if (isOlder) options.unshift({ value: water.waterAnalysisId, label: 'An older analysis, kept as it was chosen' });
   if (!canEdit) {
     return (
-      <li className={styles.row}>
+      <li className={`${styles.row} ${styles.read}`}>
         <span>
           {chosen?.name ?? 'An older analysis'}
           {chosen && (
             <span className={styles.quiet}>
-              {' '}
-              · sampled {formatDate(chosen.analysis.sampledOn)} · {chosen.sulfate}
+              sampled {formatDate(chosen.analysis.sampledOn)} · {chosen.sulfate}
             </span>
           )}
         </span>

@@ -8,7 +8,7 @@ export function ReviewLead({ review, timeZone }: { review: ReviewView; timeZone:
       sent by <strong>{review.submittedBy}</strong> {formatMoment(review.submittedAt, timeZone)}
       {review.state === 'open' && (
         <>
-          , waiting <strong>{formatAge(review.submittedAt)}</strong>
+          , waiting <strong>{formatAge(review.submittedAt).replaceAll(' ', '\u00a0')}</strong>
         </>
       )}{' '}
       · {replacesWords(review)}

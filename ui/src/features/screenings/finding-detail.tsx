@@ -5,7 +5,7 @@ import { StatusMark } from '../../components/status-mark';
 import { formatNumber } from '../../lib/format';
 import styles from './finding-detail.module.css';
 import { chanceInLoads, decimalsFor, findingFigures } from './finding-figures';
-import { ruleTitle } from './rule-words';
+import { contributorTitle, ruleTitle } from './rule-words';
 import { asksForSignature } from './who-signs';
 
 const MOST_CONTRIBUTORS = 5;
@@ -43,7 +43,7 @@ function Contributors({ finding }: { finding: Finding }) {
     <ul className={styles.contributors}>
       {greatest.map((contributor) => (
         <li key={contributor.name}>
-          <span>{contributor.name}</span>
+          <span>{contributorTitle(contributor.name)}</span>
           <span>{formatNumber(contributor.value, decimals)}</span>
         </li>
       ))}

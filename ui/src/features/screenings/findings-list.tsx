@@ -1,26 +1,30 @@
 import { sources } from '@brimgate/reference-tables';
 import type { Finding, Screening } from '@brimgate/rules';
+import { Disclosure } from '../../components/disclosure';
 import { ProvenanceTag } from '../../components/provenance-tag';
 import { StatusMark } from '../../components/status-mark';
 import { formatNumber } from '../../lib/format';
 import { sourceWords } from './finding-detail';
 import { chanceInLoads, decimalsFor, findingFigures } from './finding-figures';
-
 import { inSentence, ruleTitle } from './rule-words';
 import styles from './screenings.module.css';
-import { asksForSignature, findingsByGroup, signOffSentences } from './who-signs';
+import { asksForSignature, gravestFirst, signOffSentences } from './who-signs';
 
-/** Every finding in words: value, limit and its status, why, what is missing, whose word it stands on. */
+/** Every finding in words: value, limit and its status, why, whose word it stands on. What is within is folded away. */
 export function FindingsList({ screening }: { screening: Screening }) {
   const { edition, findings } = screening;
   const notAsked = findings.filter((finding) => !finding.applies);
+  const asked = gravestFirst(findings.filter((finding) => finding.applies));
+  const within = asked.filter((finding) => finding.status === 'within');
+  const others = asked.filter((finding) => finding.status !== 'within');
   return (
     <>
-      <ul className={styles.list}>
-        {findingsByGroup(findings, edition).map((finding) => (
-          <FindingItem key={finding.rule} finding={finding} edition={edition} />
-        ))}
-      </ul>
+      {others.length > 0 && <FindingItems findings={others} edition={edition} />}
+      {within.length > 0 && (
+        <Disclosure summary={withinTitle(within.length, others.length)}>
+          <FindingItems findings={within} edition={edition} />
+        </Disclosure>
+      )}
       {notAsked.length > 0 && (
         <p className={styles.small}>
           Not asked of this ration: {notAsked.map((finding) => inSentence(ruleTitle(finding.rule, edition))).join(', ')}
@@ -30,6 +34,20 @@ export function FindingsList({ screening }: { screening: Screening }) {
     </>
   );
 }
+
+function withinTitle(within: number, others: number): string {
+  if (others === 0)
+    return within === 1 ? 'The one finding is within its limit' : `All ${within} are within their limits`;
+  return within === 1 ? 'One within its limit' : `${within} within their limits`;
+}
+
+const FindingItems = ({ findings, edition }: { findings: readonly Finding[]; edition: string }) => (
+  <ul className={styles.list}>
+    {findings.map((finding) => (
+      <FindingItem key={finding.rule} finding={finding} edition={edition} />
+    ))}
+  </ul>
+);
 
 function FindingItem({ finding, edition }: { finding: Finding; edition: string }) {
   const title = ruleTitle(finding.rule, edition);

@@ -20,6 +20,9 @@ export function limitTableOf(rule: string, edition: string): LimitTable | null {
   return rule in tables.limits ? tables.limits[rule as RuleId] : null;
 }
 
+/** What the rules call the water among the contributors. */
+export const WATER = 'drinking water';
+
 const sentenceCase = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
 
 export const ruleTitle = (rule: string, edition: string): string =>
@@ -27,6 +30,9 @@ export const ruleTitle = (rule: string, edition: string): string =>
 
 export const shortRuleTitle = (rule: string, edition: string): string =>
   shortTitles[rule as RuleId] ?? ruleTitle(rule, edition);
+
+/** Among feedstuffs, which all start with a capital, the water does so too. */
+export const contributorTitle = (name: string): string => (name === WATER ? sentenceCase(name) : name);
 
 export const shortUnit = (unit: string): string => shortUnits[unit] ?? unit;
 

@@ -7,12 +7,10 @@ import { DataTable } from '../../components/data-table';
 import { ProvenanceTag } from '../../components/provenance-tag';
 import { formatNumber } from '../../lib/format';
 import { decimalsFor } from './finding-figures';
-
-import { limitTableOf } from './rule-words';
+import { contributorTitle, limitTableOf, WATER } from './rule-words';
 import styles from './screenings.module.css';
 import { asksForSignature } from './who-signs';
 
-const WATER = 'drinking water';
 const THREE_DECIMALS = 3;
 const formatSulfur = (value: number) => formatNumber(value, THREE_DECIMALS);
 
@@ -25,7 +23,11 @@ interface SulfurContributorsProps {
 export function SulfurContributors({ screening, request }: SulfurContributorsProps) {
   const finding = screening.findings.find((candidate) => candidate.rule === 'total-sulfur');
   if (!finding) return null;
-  const parts = finding.contributors.map((part) => ({ ...part, isApart: part.name === WATER }));
+  const parts = finding.contributors.map((part) => ({
+    ...part,
+    name: contributorTitle(part.name),
+    isApart: part.name === WATER,
+  }));
   if (parts.length === 0) {
     return (
       <p className={styles.quiet}>
@@ -41,7 +43,8 @@ export function SulfurContributors({ screening, request }: SulfurContributorsPro
         parts={parts}
         lines={sulfurLines(finding, screening.edition)}
         formatValue={formatSulfur}
-        sentence={sulfurSentence(finding, parts, request)}
+        sentence={sulfurSentence(parts)}
+        note={known(finding, request)}
         asksForSignature={finding.status === 'over' && asksForSignature(finding.signOff)}
       />
       <LineSources finding={finding} edition={screening.edition} />
@@ -86,23 +89,24 @@ function sulfurLines(finding: Finding, edition: string): ContributorLine[] {
   return [{ value: finding.limit, text: `limit ${text(finding.limit)}`, isLimit: true }, ...grades];
 }
 
-function sulfurSentence(finding: Finding, parts: readonly ContributorPart[], request: ScreeningRequest): string {
+function sulfurSentence(parts: readonly ContributorPart[]): string {
   const total = sumOf(parts);
   const water = parts.find((part) => part.isApart);
   const [greatest] = parts.filter((part) => !part.isApart).toSorted((a, b) => b.value - a.value);
-  const share = (value: number) => (total > 0 ? ` (${formatNumber((100 * value) / total, 0)} %)` : '');
-  const known =
-    finding.value === null ? ` That is what is known; missing: ${listMissing(finding.missing, request)}.` : '';
+  const share = ({ name, value }: ContributorPart) =>
+    `${name} ${total > 0 ? `${formatNumber((100 * value) / total, 0)} %` : formatSulfur(value)}`;
   return [
-    water
-      ? `Water brings ${formatSulfur(water.value)} % of DM${share(water.value)}`
-      : 'No sulfur from water is counted',
-    greatest ? `, ${greatest.name} ${formatSulfur(greatest.value)}${share(greatest.value)}` : '',
-    `, all together ${formatSulfur(total)} % of DM.${known}`,
+    `Of ${formatSulfur(total)} % of DM: `,
+    [water && share(water), greatest && share(greatest)].filter(Boolean).join(', '),
+    water ? '' : ', water not counted',
   ].join('');
 }
 
-/** On whose word the lines stand. */
+/** A sum with a part unknown is only what is known of it. */
+const known = (finding: Finding, request: ScreeningRequest) =>
+  finding.value === null ? `That is what is known; missing: ${listMissing(finding.missing, request)}.` : undefined;
+
+/** On whose word the lines stand; what a grade is called stands in its window and among the findings. */
 function LineSources({ finding, edition }: { finding: Finding; edition: string }) {
   const grades = gradesAbove(finding, edition);
   return (
@@ -120,10 +124,10 @@ function LineSources({ finding, edition }: { finding: Finding; edition: string }
       )}
       {grades.map((grade) => (
         <span key={grade.above}>
-          {formatNumber(grade.above, 2)} {grade.label}{' '}
+          above {formatNumber(grade.above, 2)}{' '}
           <ProvenanceTag
             status={grade.status}
-            locator={grade.locator}
+            locator={`${grade.label}: ${grade.locator}`}
             source={sources[grade.sourceId] ?? null}
             of={`grade at ${formatNumber(grade.above, 2)}`}
           />

@@ -8,9 +8,8 @@ import {
 } from '@brimgate/rules';
 import { formatNumber } from '../../lib/format';
 import { decimalsFor, findingFigures } from './finding-figures';
-
 import { inSentence, limitTableOf, ruleTitle } from './rule-words';
-import { asksForSignature, signOffSentences, weightOf, whoseMatter } from './who-signs';
+import { asksForSignature, gravestFirst, signOffSentences, whoseMatter } from './who-signs';
 
 export interface VerdictWords {
   status: FindingStatus;
@@ -23,11 +22,6 @@ export interface VerdictWords {
   /** What the verdict leaves out, in small print; '' when nothing. */
   besides: string;
 }
-
-const gravestFirst = (findings: readonly Finding[]) =>
-  findings.toSorted(
-    (a, b) => weightOf(b.signOff) - weightOf(a.signOff) || (b.percentOfLimit ?? 0) - (a.percentOfLimit ?? 0),
-  );
 
 /** The verdict of a screening in one sentence, who signs in a second, and what both leave out. Never "safe", never "clear". */
 export function verdictWords(screening: Screening, request: ScreeningRequest): VerdictWords {

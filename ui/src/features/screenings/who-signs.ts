@@ -1,5 +1,5 @@
 import type { SignOff } from '@brimgate/reference-tables';
-import type { Finding } from '@brimgate/rules';
+import type { Finding, FindingStatus } from '@brimgate/rules';
 import { limitTableOf } from './rule-words';
 
 const weights: Readonly<Record<SignOff, number>> = { none: 0, notice: 1, reason: 2, compliance: 3, veterinarian: 4 };
@@ -39,4 +39,17 @@ export function findingsByGroup(findings: readonly Finding[], edition: string): 
   return findings
     .filter((finding) => finding.applies)
     .toSorted((a, b) => weightOf(whoseMatter(b, edition)) - weightOf(whoseMatter(a, edition)));
+}
+
+const statusWeights: Readonly<Record<FindingStatus, number>> = { within: 0, near: 1, undetermined: 2, over: 3 };
+const gravity = ({ status }: Finding) => (status === null ? 0 : statusWeights[status]);
+
+/** By who has to sign, then by status, then by how much of the limit is used. */
+export function gravestFirst(findings: readonly Finding[]): Finding[] {
+  return findings.toSorted(
+    (a, b) =>
+      weightOf(b.signOff) - weightOf(a.signOff) ||
+      gravity(b) - gravity(a) ||
+      (b.percentOfLimit ?? 0) - (a.percentOfLimit ?? 0),
+  );
 }

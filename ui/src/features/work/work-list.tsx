@@ -3,7 +3,7 @@ import { Link } from 'react-router-dom';
 import { Section } from '../../components/section';
 import { statusOf, StatusMark } from '../../components/status-mark';
 import { formatAge, formatNumber } from '../../lib/format';
-import { groupWords } from './work-words';
+import { brieflyFound, groupWords } from './work-words';
 import styles from './work-list.module.css';
 
 interface WorkListProps {
@@ -34,8 +34,14 @@ export function WorkList({ groups, pathOf }: WorkListProps) {
 
 const titleOf = (group: WorkGroup) => `${groupWords[group.key].title}, ${formatNumber(group.total, 0)}`;
 
-const asksIn = (group: WorkGroup['key'], status: string) =>
-  status === 'over' && group !== 'recently-released' && group !== 'lots-incomplete';
+/** Signed already, or nothing to sign: what is over is not coloured. */
+const nobodySignsIn: ReadonlySet<WorkGroup['key']> = new Set([
+  'ready-to-release',
+  'recently-released',
+  'lots-incomplete',
+]);
+
+const asksIn = (group: WorkGroup['key'], status: string) => status === 'over' && !nobodySignsIn.has(group);
 
 function WorkItemLine({ item, group, to }: { item: WorkItem; group: WorkGroup['key']; to: string }) {
   const status = statusOf(item.status);
@@ -45,9 +51,9 @@ function WorkItemLine({ item, group, to }: { item: WorkItem; group: WorkGroup['k
         <Link to={to}>{item.title}</Link>
         <span className={styles.quiet}>{item.yard}</span>
       </p>
-      <p className={styles.detail}>
+      <p className={status ? styles.finding : styles.detail}>
         {status && <StatusMark status={status} asksForSignature={asksIn(group, status)} />}
-        <span>{item.detail}</span>
+        <span>{status && group !== 'sent-back' ? brieflyFound(item.detail) : item.detail}</span>
       </p>
       <p className={styles.age}>{ageWords(item, group)}</p>
     </>

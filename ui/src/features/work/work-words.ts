@@ -4,7 +4,7 @@ import type { Role, WorkGroup } from '@brimgate/rules';
 export const groupWords: Readonly<Record<WorkGroup['key'], { title: string; aside: string }>> = {
   'to-sign': { title: 'To sign', aside: 'oldest first' },
   'sent-back': { title: 'Sent back to you', aside: 'with a reason' },
-  'ready-to-release': { title: 'Ready to release', aside: 'nothing is missing any more' },
+  'ready-to-release': { title: 'Ready to release', aside: 'nothing waits for anybody else' },
   'waiting-for-others': { title: 'Waiting for others', aside: 'in review' },
   drafts: { title: 'Drafts', aside: 'not screened, or changed since' },
   'to-acknowledge': { title: 'To acknowledge', aside: 'advisories for your yard' },
@@ -36,3 +36,7 @@ export const emptyWords: Readonly<Record<Role, { title: string; next: string }>>
     next: 'Look after the yards’ addresses, caps and gates; what people did stands in the audit trail.',
   },
 };
+
+/** A finding to value and limit: what qualifies the limit and where the most comes from stand on the ration's page. */
+export const brieflyFound = (detail: string): string =>
+  detail.replace(/((?:above|below|near|within) the (?:limit|minimum) of [^(]+?) \(.*$/s, '$1.');

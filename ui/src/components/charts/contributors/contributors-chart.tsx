@@ -6,8 +6,10 @@ interface ContributorsChartProps {
   parts: readonly ContributorPart[];
   lines: readonly ContributorLine[];
   formatValue: (value: number) => string;
-  /** The chart in one sentence. */
+  /** The chart in one sentence without its point: parts that have no label are named at its end. */
   sentence: string;
+  /** What the sum leaves out. */
+  note?: string;
   /** The sum is over its limit, and somebody must sign. */
   asksForSignature: boolean;
 }
@@ -18,10 +20,18 @@ const OVERHANG = 5;
 const LABEL_HEIGHT = 44;
 
 /** The parts of a sum on one bar against its limit. */
-export function ContributorsChart({ parts, lines, formatValue, sentence, asksForSignature }: ContributorsChartProps) {
+export function ContributorsChart({
+  parts,
+  lines,
+  formatValue,
+  sentence,
+  note,
+  asksForSignature,
+}: ContributorsChartProps) {
   const [frame, width] = useElementWidth<HTMLDivElement>(520);
   const layout = contributorsLayout({ parts, lines, width, formatValue });
   const barTop = layout.lineRows * LINE_ROW_HEIGHT + OVERHANG + 4;
+  const rest = layout.unlabelled.map((part) => `${part.name} ${formatValue(part.value)}`);
   const height = barTop + BAR_HEIGHT + LABEL_HEIGHT;
   return (
     <figure>
@@ -67,12 +77,10 @@ export function ContributorsChart({ parts, lines, formatValue, sentence, asksFor
           ))}
         </svg>
       </div>
-      {layout.unlabelled.length > 0 && (
-        <p className={styles.rest}>
-          Then {layout.unlabelled.map((part) => `${part.name} ${formatValue(part.value)}`).join(', ')}.
-        </p>
-      )}
-      <figcaption className={styles.sentence}>{sentence}</figcaption>
+      <figcaption className={styles.sentence}>
+        {sentence}
+        {rest.length > 0 && `; then ${rest.join(', ')}`}. {note}
+      </figcaption>
     </figure>
   );
 }
