@@ -7,6 +7,9 @@ module.exports = {
   testMatch: ['**/*.spec.ts', '**/*.e2e-spec.ts'],
   setupFiles: ['<rootDir>/test/support/environment.ts'],
   maxWorkers: 2,
+  // A worker keeps what every spec loaded; grown past this it is replaced. Near a gigabyte, Node.js takes longer to give
+  // the memory back than Jest waits for a worker to end, and Jest then speaks of leaks where nothing is left open.
+  workerIdleMemoryLimit: '500MB',
   testTimeout: 20_000,
   transform: {
     '^.+\\.ts$': [

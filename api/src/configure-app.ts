@@ -4,6 +4,7 @@ import compression from 'compression';
 import cookieParser from 'cookie-parser';
 import type { NextFunction, Request, Response } from 'express';
 import helmet from 'helmet';
+import { answerUnreadableConnections } from './common/unreadable-connections';
 import { env } from './config/env';
 import { serveUi } from './serve-ui';
 
@@ -60,4 +61,5 @@ export function configureApp(app: NestExpressApplication): void {
     ],
   });
   serveUi(app);
+  answerUnreadableConnections(app.getHttpServer());
 }

@@ -112,7 +112,7 @@ describe('the nutrient ledger', () => {
       expect(head.join('\n')).toContain(`'=Yard, "North"`);
       expect(head.join('\n')).toContain('2026-01-01 to 2026-06-30');
       expect(head.join('\n')).toContain(operation.compliance.person.name);
-      expect(head.join('\n')).toContain(`${lots[0]?.rulesVersion}, ${lots[0]?.edition}`);
+      expect(head.join('\n')).toContain(`rules ${lots[0]?.rulesVersion}, tables of edition ${lots[0]?.edition}`);
     });
 
     it('has a heading with units and a row for each lot, with the figures as stored', async () => {
@@ -130,6 +130,8 @@ describe('the nutrient ledger', () => {
       expect(text).toContain('Estimate, not analysis');
       expect(text).toMatch(/Local nutrient-management rules and the licensed planner decide/);
       expect(text).toMatch(/Source,.*(ASABE|Manure)/i);
+      expect(text).not.toMatch(/Source,.*\bnone\b/);
+      expect(text).toContain('P is not P2O5');
     });
 
     it.each(FORMULAS)('takes the formula out of %j in a text', async (formula) => {

@@ -160,7 +160,7 @@ describe('yards', () => {
       expect(rows).toHaveLength(1);
       const [event] = rows as { act: string; subject_uuid: string; changes: { field: string }[] }[];
       expect(event).toMatchObject({ act: 'yard-changed', subject_uuid: yard.uuid });
-      expect(event?.changes).toContainEqual({ field: 'name', before: yard.name, after: 'Audited yard' });
+      expect(event?.changes).toContainEqual({ field: 'Name', before: yard.name, after: 'Audited yard' });
     });
   });
 });

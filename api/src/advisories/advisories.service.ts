@@ -68,7 +68,12 @@ export class AdvisoriesService {
         { acknowledgedById: user.personId, acknowledgedByName: user.name, acknowledgedAt: new Date() },
         { transaction },
       );
-      await this.record(user, advisory, { act: 'advisory-acknowledged', sentence: 'Acknowledged' }, transaction);
+      await this.record(
+        user,
+        advisory,
+        { act: 'advisory-acknowledged', sentence: 'Acknowledged the advisory' },
+        transaction,
+      );
       return this.view({ user, advisoryId }, transaction);
     });
   }
@@ -86,7 +91,7 @@ export class AdvisoriesService {
       await this.record(
         user,
         advisory,
-        { act: 'delivery-retried', sentence: `Queued again for ${delivery.recipient}` },
+        { act: 'delivery-retried', sentence: `Sent the advisory again to ${delivery.recipient}` },
         transaction,
       );
       return this.view({ user, advisoryId }, transaction);

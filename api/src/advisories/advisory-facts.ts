@@ -42,6 +42,7 @@ export type AdvisoryFacts = FeedingFacts & {
   actedBy: string;
   actedAt: string;
   reason: string | null;
+  /** What is over stands before what is near. */
   flagged: FindingFacts[];
   undetermined: FindingFacts[];
   rest: FindingFacts[];
@@ -59,7 +60,8 @@ export type AdvisoryFacts = FeedingFacts & {
 // One line whatever a name holds: a subject with a line break would begin a header of its own.
 const asOneLine = (text: string) => text.replace(/[\p{Cc}\s]+/gu, ' ').trim();
 
-const isFlagged = ({ applies, status }: Finding) => applies && (status === 'over' || status === 'near');
+const isOver = ({ applies, status }: Finding) => applies && status === 'over';
+const isNear = ({ applies, status }: Finding) => applies && status === 'near';
 const isUndetermined = ({ applies, status }: Finding) => applies && status === 'undetermined';
 
 function headlineOf({ findings, edition, verdict }: Screening): string {
@@ -90,8 +92,8 @@ function cautionsOf({ totals, findings }: Screening): Caution[] {
   return [...ids, 'call-veterinarian'].filter((id, index, all) => all.indexOf(id) === index).map(cautionOf);
 }
 
-const inOneSentence = ({ title, whatIsWrong, whatFollows, howToAvoid }: Caution) =>
-  `${title}: ${whatIsWrong} ${whatFollows} ${howToAvoid}`;
+const inOneParagraph = ({ whatIsWrong, whatFollows, howToAvoid }: Caution) =>
+  `${whatIsWrong} ${whatFollows} ${howToAvoid}`;
 
 export function advisoryFacts(matter: AdvisoryMatter): AdvisoryFacts {
   const { screening, yard } = matter;
@@ -115,14 +117,14 @@ export function advisoryFacts(matter: AdvisoryMatter): AdvisoryFacts {
     actedBy: matter.actedBy,
     actedAt: yardTime(matter.actedAt, yard.timeZone),
     reason: matter.reason,
-    flagged: findings.filter(isFlagged).map(inWords),
+    flagged: [...findings.filter(isOver), ...findings.filter(isNear)].map(inWords),
     undetermined: findings.filter(isUndetermined).map(inWords),
     rest: findings.filter(({ applies, status }) => applies && status === 'within').map(inWords),
     assumptions: [...screening.assumptions],
     cautions: cautionsOf(screening),
     signatures,
     conditions: signatures.flatMap((signature) => signature.conditions),
-    notices: [inOneSentence(cautionOf('screening-aid')), inOneSentence(cautionOf('local-rules'))],
+    notices: [inOneParagraph(cautionOf('screening-aid')), inOneParagraph(cautionOf('local-rules'))],
     edition,
     rulesVersion: screening.rulesVersion,
     link: matter.link,

@@ -19,7 +19,7 @@ function templatesFolder(): string {
 /** Compiles a template that ships with the code; text from people only ever fills it. */
 function compile(folder: string, name: string, kind: 'html' | 'text'): Template {
   const handlebars = Handlebars.create();
-  for (const part of ['feeding', 'findings', 'notices', 'signatures', 'watch']) {
+  for (const part of ['feeding', 'figures', 'findings', 'notices', 'signatures', 'watch']) {
     const file = join(folder, 'parts', `${part}.${kind}.hbs`);
     handlebars.registerPartial(part, readFileSync(file, 'utf8'));
   }

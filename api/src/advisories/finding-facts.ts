@@ -1,5 +1,5 @@
 import { sources, tablesOf, type RuleId, type ValueStatus } from '@brimgate/reference-tables';
-import { displayNumber, type Finding, type FindingStatus } from '@brimgate/rules';
+import { displayNumber, readingBeside, readingNumber, type Finding, type FindingStatus } from '@brimgate/rules';
 
 /** One finding in the words of the mail; every field is text, so that a template only places it. */
 export type FindingFacts = {
@@ -7,12 +7,12 @@ export type FindingFacts = {
   /** Told apart without colour: over ◆, near ◐, within ○, not determined ◌. */
   shape: string;
   status: string;
+  /** With its unit, as is the limit. */
   value: string;
   limit: string;
-  unit: string;
-  limitStatus: string;
-  source: string;
   why: string;
+  /** Status and document of the limit, as one phrase. */
+  source: string;
 };
 
 const STATUS_WORDS: Readonly<Record<FindingStatus, string>> = {
@@ -43,22 +43,30 @@ export function findingTitle(finding: Pick<Finding, 'rule'>, edition: string): s
 
 /** A ratio's unit is part of its number: "3.2:1". */
 const isRatio = ({ unit }: Finding) => unit.startsWith(':');
-const shown = (value: number, finding: Finding) => `${displayNumber(value)}${isRatio(finding) ? finding.unit : ''}`;
+const withUnit = (shown: string, finding: Finding) => `${shown}${isRatio(finding) ? '' : ' '}${finding.unit}`;
 
 function valueText(finding: Finding): string {
-  if (finding.value !== null) return shown(finding.value, finding);
-  return finding.atLeast === null ? 'not determined' : `at least ${shown(finding.atLeast, finding)}`;
+  const { value, atLeast, limit } = finding;
+  const beside = (known: number) =>
+    withUnit(limit === null ? readingNumber(known) : readingBeside(known, limit), finding);
+  if (value !== null) return beside(value);
+  return atLeast === null ? 'not determined' : `at least ${beside(atLeast)}`;
 }
 
 function limitText(finding: Finding): string {
   if (finding.limit === null) return 'none';
-  return `${finding.direction === 'min' ? 'at least ' : ''}${shown(finding.limit, finding)}`;
+  const bound = withUnit(displayNumber(finding.limit), finding);
+  return finding.direction === 'min' ? `at least ${bound}` : bound;
 }
 
-function sourceText({ basis, limitLocator }: Finding): string {
+function sourceText({ basis, limitLocator, limitStatus }: Finding): string {
+  // A bound of the firm's or the yard's own says by its locator whose it is.
+  if (limitStatus === null) return limitLocator?.replace(/^own limit/, "the firm's own limit") ?? 'of no document';
   const source = sources[basis[0] ?? ''];
-  if (!source) return limitLocator ?? 'no document';
-  return `${source.title}, ${source.publisher}${source.year === null ? '' : ` ${source.year}`}`;
+  const document = source
+    ? [source.title, source.publisher, source.year].filter((part) => part !== null && part !== 'none').join(', ')
+    : (limitLocator ?? 'no document');
+  return `${LIMIT_STATUS_WORDS[limitStatus]}: ${document}`;
 }
 
 export function findingFacts(finding: Finding, edition: string): FindingFacts {
@@ -68,9 +76,7 @@ export function findingFacts(finding: Finding, edition: string): FindingFacts {
     status: statusWord(finding),
     value: valueText(finding),
     limit: limitText(finding),
-    unit: isRatio(finding) ? 'as a ratio' : finding.unit,
-    limitStatus: finding.limitStatus === null ? 'not stated' : LIMIT_STATUS_WORDS[finding.limitStatus],
-    source: sourceText(finding),
     why: finding.why,
+    source: sourceText(finding),
   };
 }

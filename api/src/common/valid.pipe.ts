@@ -1,4 +1,5 @@
 import type { ArgumentMetadata, PipeTransform } from '@nestjs/common';
+import { plainMessage } from '@brimgate/rules';
 import * as v from 'valibot';
 import type { FieldError } from './domain-error';
 import { BodyUnreadable, InputInvalid } from './request-errors';
@@ -14,7 +15,10 @@ class ValidPipe<Schema extends v.GenericSchema> implements PipeTransform<unknown
   transform(value: unknown, { type }: ArgumentMetadata): v.InferOutput<Schema> {
     // Express leaves the body out when its content type is not JSON.
     if (type === 'body' && value === undefined) throw new BodyUnreadable();
-    const result = v.safeParse(this.schema, value);
+    // To the schema a list is an object of no fields: say what is wrong instead of naming every field as missing.
+    if (Array.isArray(value))
+      throw new InputInvalid([{ path: '', message: 'Send one object with fields, not a list' }]);
+    const result = v.safeParse(this.schema, value, { message: plainMessage });
     if (!result.success) throw new InputInvalid(fieldErrors(result.issues));
     return result.output;
   }

@@ -37,11 +37,12 @@ export class LedgerExport {
       ['Nutrient ledger', 'estimate, not analysis'],
       ['Firm', user.firmName],
       ['Yard', yard.name],
-      ['Lots that ended from', from, 'to', to],
-      ['Written', yardTime(new Date(), yard.timeZone), 'by', user.name],
+      ['Lots that ended', `${from} to ${to}, both days included`],
+      ['Written', yardTime(new Date(), yard.timeZone)],
+      ['Written by', user.name],
       [
-        'Rules version and edition of the reference tables',
-        ...bases.map((basis) => `${basis.rulesVersion}, ${basis.edition}`),
+        'Rules and reference tables',
+        bases.map(({ rulesVersion, edition }) => `rules ${rulesVersion}, tables of edition ${edition}`).join('; '),
       ],
       [],
     ];
@@ -65,6 +66,7 @@ function foot(sourceIds: readonly string[]): Cell[][] {
   return [
     [],
     ['A figure that reads "not determined" is unknown, not zero, and stands in no sum.'],
+    ['N, P and K are the elements: P is not P2O5, K is not K2O. Weights are live or shrunk as "Weight basis" says.'],
     [`Estimate, not analysis. ${whatIsWrong} ${whatFollows} ${howToAvoid}`],
     ['Screening aid, not veterinary or legal advice. Local nutrient-management rules and the licensed planner decide.'],
     ...sourceLines(sourceIds).map((line) => ['Source', line]),

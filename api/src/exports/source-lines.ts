@@ -5,6 +5,8 @@ export function sourceLines(ids: readonly string[]): string[] {
   return [...new Set(ids)].flatMap((id) => {
     const source = sources[id];
     if (!source) return [];
-    return [[source.title, source.publisher, source.year].filter((part) => part !== null).join(', ')];
+    // What rests on no document has no publisher either.
+    const parts = [source.title, source.publisher, source.year];
+    return [parts.filter((part) => part !== null && part !== 'none').join(', ')];
   });
 }

@@ -5,7 +5,8 @@ import { feedstuffs as book, findFeedstuff } from '@brimgate/reference-tables/fe
 import type { FeedstuffInput, FeedstuffListItem, FeedstuffView } from '@brimgate/rules';
 import type { Transaction } from 'sequelize';
 import { AuditService } from '../audit/audit.service';
-import { changesBetween } from '../common/changes';
+import { type Changes, changesBetween, entered } from '../audit/changes';
+import { feedstuffWords } from '../audit/field-words';
 import type { CurrentUser } from '../common/current-user';
 import { TransactionsService } from '../common/transactions.service';
 import { DUPLICATE_KEY, errorNumber } from '../database/error-number';
@@ -18,6 +19,14 @@ import { toBookListItem, toBookView, toFirmListItem, toFirmView } from './feedst
 
 // The book does not change while the program runs.
 const bookItems: readonly FeedstuffListItem[] = book.map(toBookListItem);
+
+type Recorded = {
+  user: CurrentUser;
+  act: 'feedstuff-entered' | 'feedstuff-changed';
+  row: FeedstuffModel;
+  name: string;
+  changes: Changes;
+};
 
 @Injectable()
 export class FeedstuffsService {
@@ -53,7 +62,8 @@ export class FeedstuffsService {
           },
           { transaction },
         );
-        await this.record(transaction, { user, act: 'feedstuff-entered', verb: 'entered', row, before: {}, input });
+        const changes = entered(feedstuffWords, fieldsOf(input));
+        await this.record(transaction, { user, act: 'feedstuff-entered', row, name: input.name, changes });
         return toFirmView(row);
       }),
     );
@@ -68,10 +78,11 @@ export class FeedstuffsService {
     return this.naming(() =>
       this.transactions.run(async (transaction) => {
         const row = await this.find(uuid, user, transaction);
-        const before = row.get({ plain: true }) as Record<string, unknown>;
+        const before = fieldsOf(row);
         const values = { ...input, savedAt: new Date(), savedById: user.personId };
         await saveVersion(this.feedstuffs, { firmId: row.firmId, id: row.id, version }, values, transaction);
-        await this.record(transaction, { user, act: 'feedstuff-changed', verb: 'changed', row, before, input });
+        const changes = changesBetween(feedstuffWords, before, fieldsOf(input));
+        await this.record(transaction, { user, act: 'feedstuff-changed', row, name: input.name, changes });
         return toFirmView(await this.find(uuid, user, transaction));
       }),
     );
@@ -83,30 +94,13 @@ export class FeedstuffsService {
     return row;
   }
 
-  private async record(
-    transaction: Transaction,
-    {
+  private record(transaction: Transaction, { user, act, row, name, changes }: Recorded): Promise<void> {
+    return this.audit.record(transaction, {
       user,
       act,
-      verb,
-      row,
-      before,
-      input,
-    }: {
-      user: CurrentUser;
-      act: string;
-      verb: string;
-      row: FeedstuffModel;
-      before: Record<string, unknown>;
-      input: FeedstuffInput;
-    },
-  ): Promise<void> {
-    await this.audit.record(transaction, {
-      user,
-      act,
-      sentence: `${user.name} ${verb} the feedstuff ${input.name}`,
-      subject: { kind: 'feedstuff', id: row.uuid, name: input.name },
-      changes: changesBetween(before, input),
+      sentence: `${act === 'feedstuff-entered' ? 'Entered' : 'Changed'} the feedstuff ${name}`,
+      subject: { kind: 'feedstuff', id: row.uuid, name },
+      changes,
     });
   }
 
@@ -118,3 +112,20 @@ export class FeedstuffsService {
     }
   }
 }
+
+/** What was analysed beside the other fields, so that the audit trail tells each nutrient by itself. */
+const fieldsOf = ({
+  name,
+  bookFeedstuffId,
+  analysedOn,
+  laboratory,
+  note,
+  analysed,
+}: FeedstuffInput): Record<string, unknown> => ({
+  ...analysed,
+  name,
+  bookFeedstuffId,
+  analysedOn,
+  laboratory,
+  note,
+});

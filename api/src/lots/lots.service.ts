@@ -3,7 +3,8 @@ import type { LotInput, LotView } from '@brimgate/rules';
 import { Injectable } from '@nestjs/common';
 import type { Transaction } from 'sequelize';
 import { AuditService } from '../audit/audit.service';
-import { changesBetween } from '../common/changes';
+import { changesBetween, entered } from '../audit/changes';
+import { lotWords } from '../audit/field-words';
 import type { CurrentUser } from '../common/current-user';
 import { TransactionsService } from '../common/transactions.service';
 import { ofYards } from '../database/firm-scope';
@@ -35,14 +36,16 @@ export class LotsService {
         { firmId: user.firmId, uuid: randomUUID(), version: 1, ...columns },
         { transaction },
       );
+      const view = await this.list.view({ user, lotId: lot.uuid }, transaction);
       await this.audit.record(transaction, {
         user,
         act: 'lot-entered',
-        sentence: `Entered the lot ${lot.name} of ${lot.head} head`,
+        sentence: `Entered ${lotInWords(lot.name)}`,
         subject: { kind: 'lot', id: lot.uuid, name: lot.name },
         yardId: lot.yardId,
+        changes: entered(lotWords, fieldsOf(view)),
       });
-      return this.list.view({ user, lotId: lot.uuid }, transaction);
+      return view;
     });
   }
 
@@ -52,17 +55,19 @@ export class LotsService {
       const lot = await LotModel.findOne({ where, lock: transaction.LOCK.UPDATE, transaction });
       if (!lot) throw new LotNotFound();
       if (lot.version !== version) throw new VersionStale(lot.version);
+      const before = await this.list.view({ user, lotId }, transaction);
       const columns = await this.columnsOf({ input, user }, transaction);
       await saveVersion(LotModel, lot, columns, transaction);
+      const view = await this.list.view({ user, lotId }, transaction);
       await this.audit.record(transaction, {
         user,
         act: 'lot-changed',
-        sentence: `Changed the lot ${columns.name}`,
+        sentence: `Changed ${lotInWords(columns.name)}`,
         subject: { kind: 'lot', id: lot.uuid, name: columns.name },
         yardId: columns.yardId,
-        changes: changesBetween(lot.get() as Record<string, unknown>, enteredOf(columns)),
+        changes: changesBetween(lotWords, fieldsOf(before), fieldsOf(view)),
       });
-      return this.list.view({ user, lotId }, transaction);
+      return view;
     });
   }
 
@@ -92,16 +97,12 @@ export class LotsService {
   }
 }
 
-/** What a person entered, without what was computed from it and who saved it when. */
-function enteredOf<Columns extends object>(columns: Columns) {
-  const computed = new Set([
-    'excretion',
-    'isDetermined',
-    'rulesVersion',
-    'edition',
-    'savedById',
-    'savedByName',
-    'savedAt',
-  ]);
-  return Object.fromEntries(Object.entries(columns).filter(([name]) => !computed.has(name)));
-}
+/** The yard and the ration fed by their names, as the audit trail tells them. */
+const fieldsOf = ({ yard, release, ...lot }: LotView): Record<string, unknown> => ({
+  ...lot,
+  yard: yard.name,
+  ration: release && `${release.rationName}, version ${release.versionNumber}`,
+});
+
+// Most lots are called "Lot 115" already.
+const lotInWords = (name: string): string => (/^lot\b/i.test(name) ? name : `the lot ${name}`);

@@ -55,7 +55,7 @@ export class RationsService {
       await this.audit.record(transaction, {
         user,
         act: 'ration-created',
-        sentence: `Created the ration ${ration.name} for ${yard.name}`,
+        sentence: `Began the ration ${ration.name} for ${yard.name}`,
         subject: { kind: 'ration', id: ration.uuid, name: ration.name },
         yardId: yard.id,
       });
@@ -96,12 +96,10 @@ export class RationsService {
     return this.audit.record(transaction, {
       user,
       act: draftChanged ? 'ration-saved' : 'ration-renamed',
-      sentence: draftChanged
-        ? `Saved version ${saved.number} of the ration ${name}`
-        : `Renamed the ration ${ration.name} to ${name}`,
+      sentence: draftChanged ? `Saved version ${saved.number} of ${name}` : `Renamed ${ration.name} to ${name}`,
       subject: { kind: 'ration', id: ration.uuid, name },
       yardId: ration.yardId,
-      changes: renamed ? [{ field: 'name', before: ration.name, after: name }] : [],
+      changes: renamed ? [{ field: 'Name', before: ration.name, after: name }] : [],
     });
   }
 

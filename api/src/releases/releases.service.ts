@@ -4,6 +4,7 @@ import { Injectable } from '@nestjs/common';
 import type { Transaction } from 'sequelize';
 import { AdvisoryWriter } from '../advisories/advisory-writer.service';
 import { AuditService } from '../audit/audit.service';
+import { contentOf, told } from '../audit/changes';
 import type { CurrentUser } from '../common/current-user';
 import { IdempotencyService } from '../common/idempotency.service';
 import { saveVersion } from '../database/save-version';
@@ -102,10 +103,7 @@ export class ReleasesService {
       sentence: `Released version ${newest.number} of ${ration.name} to ${yard.name}`,
       subject: { kind: 'ration', id: ration.uuid, name: ration.name },
       yardId: yard.id,
-      changes: [
-        { field: 'contentHash', before: null, after: screening.contentHash },
-        { field: 'reason', before: null, after: reason },
-      ],
+      changes: [...contentOf(screening.contentHash), ...told('Reason', reason)],
     });
   }
 

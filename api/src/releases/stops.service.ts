@@ -3,6 +3,7 @@ import { Injectable } from '@nestjs/common';
 import type { Transaction } from 'sequelize';
 import { AdvisoryWriter } from '../advisories/advisory-writer.service';
 import { AuditService } from '../audit/audit.service';
+import { told } from '../audit/changes';
 import type { CurrentUser } from '../common/current-user';
 import { IdempotencyService } from '../common/idempotency.service';
 import { ofYards } from '../database/firm-scope';
@@ -78,7 +79,7 @@ export class StopsService {
       sentence: `Stopped version ${release.versionNumber} of ${ration.name} at ${yard.name}`,
       subject: { kind: 'ration', id: ration.uuid, name: ration.name },
       yardId: yard.id,
-      changes: [{ field: 'reason', before: null, after: reason }],
+      changes: told('Reason', reason),
     });
   }
 

@@ -4,6 +4,7 @@ import { Injectable } from '@nestjs/common';
 import type { Transaction } from 'sequelize';
 import { PasswordService } from '../accounts/password.service';
 import { AuditService } from '../audit/audit.service';
+import { contentOf, told } from '../audit/changes';
 import type { CurrentUser } from '../common/current-user';
 import { IdempotencyService } from '../common/idempotency.service';
 import { saveVersion } from '../database/save-version';
@@ -93,18 +94,16 @@ export class DecisionsService {
   }
 
   private record({ user, role, ration, review, input }: Signature, transaction: Transaction): Promise<unknown> {
-    const did = input.decision === 'send-back' ? 'Sent back' : 'Concurred with';
     return this.audit.record(transaction, {
       user,
       act: input.decision === 'send-back' ? 'review-sent-back' : 'review-signed',
-      sentence: `${did} version ${review.versionNumber} of ${ration.name}, signing as ${role}`,
+      sentence: `${DEEDS[input.decision]} version ${review.versionNumber} of ${ration.name}, ${SIGNED_AS[role]}`,
       subject: { kind: 'ration', id: ration.uuid, name: ration.name },
       yardId: ration.yardId,
       changes: [
-        { field: 'decision', before: null, after: input.decision },
-        { field: 'contentHash', before: null, after: input.contentHash },
-        { field: 'reason', before: null, after: input.reason },
-        ...input.conditions.map((condition) => ({ field: 'condition', before: null, after: condition })),
+        ...contentOf(input.contentHash),
+        ...told('Reason', input.reason),
+        ...input.conditions.flatMap((condition) => told('Condition', condition)),
       ],
     });
   }
@@ -115,6 +114,17 @@ export class DecisionsService {
     return yard;
   }
 }
+
+const DEEDS: Readonly<Record<DecisionInput['decision'], string>> = {
+  concur: 'Concurred with',
+  'concur-with-conditions': 'Concurred, under conditions, with',
+  'send-back': 'Sent back',
+};
+
+const SIGNED_AS: Readonly<Record<SignerRole, string>> = {
+  veterinarian: 'signing as veterinarian',
+  compliance: 'signing for compliance',
+};
 
 /** One who sends back ends the review at once; otherwise it is signed when nobody at the desk is awaited any more. */
 function stateAfter(input: DecisionInput, awaits: readonly SignerRole[]): Exclude<ReviewState, 'withdrawn'> {

@@ -3,6 +3,7 @@ import type { RationView, ReviewInput } from '@brimgate/rules';
 import { Injectable } from '@nestjs/common';
 import type { Transaction } from 'sequelize';
 import { AuditService } from '../audit/audit.service';
+import { told } from '../audit/changes';
 import type { CurrentUser } from '../common/current-user';
 import { IdempotencyService } from '../common/idempotency.service';
 import { saveVersion } from '../database/save-version';
@@ -89,7 +90,7 @@ export class SubmissionsService {
       sentence: `Sent version ${newest.number} of ${ration.name} to the review desk`,
       subject: { kind: 'ration', id: ration.uuid, name: ration.name },
       yardId: ration.yardId,
-      changes: [{ field: 'reason', before: null, after: reason }],
+      changes: told('Reason', reason),
     });
   }
 

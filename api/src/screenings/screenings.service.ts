@@ -1,8 +1,16 @@
 import { randomUUID } from 'node:crypto';
-import { type RationContent, type RationView, type Screening, type ScreeningView, screen } from '@brimgate/rules';
+import {
+  type FindingStatus,
+  type RationContent,
+  type RationView,
+  type Screening,
+  type ScreeningView,
+  screen,
+} from '@brimgate/rules';
 import { Injectable } from '@nestjs/common';
 import type { Transaction } from 'sequelize';
 import { AuditService } from '../audit/audit.service';
+import { contentOf } from '../audit/changes';
 import type { CurrentUser } from '../common/current-user';
 import { TransactionsService } from '../common/transactions.service';
 import { ofYards } from '../database/firm-scope';
@@ -107,13 +115,20 @@ export class ScreeningsService {
     await this.audit.record(transaction, {
       user,
       act: 'ration-screened',
-      sentence: `Screened version ${version.number} of ${ration.name}: ${screening.verdict}`,
+      sentence: `Screened version ${version.number} of ${ration.name}: ${VERDICT_WORDS[screening.verdict]}`,
       subject: { kind: 'ration', id: ration.uuid, name: ration.name },
       yardId: ration.yardId,
-      changes: [{ field: 'contentHash', before: null, after: resolved.contentHash }],
+      changes: contentOf(resolved.contentHash),
     });
   }
 }
+
+const VERDICT_WORDS: Readonly<Record<FindingStatus, string>> = {
+  within: 'within its limits',
+  near: 'near a limit',
+  over: 'over a limit',
+  undetermined: 'not determined',
+};
 
 // The content hash names rules and edition as well: newer ones on the same figures are another screening.
 const isSameScreening = (standing: ScreeningModel, { contentHash }: ResolvedRation) =>

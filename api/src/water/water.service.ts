@@ -1,11 +1,20 @@
 import { randomUUID } from 'node:crypto';
 import { Injectable } from '@nestjs/common';
 import { InjectModel } from '@nestjs/sequelize';
-import type { WaterAnalysisInput, WaterAnalysisView, WaterSourceInput, WaterSourceView } from '@brimgate/rules';
+import {
+  displayNumber,
+  type WaterAnalysisInput,
+  type WaterAnalysisView,
+  type WaterSourceInput,
+  type WaterSourceView,
+} from '@brimgate/rules';
 import { literal, Op } from 'sequelize';
 import { PersonModel } from '../accounts/person.model';
 import { AuditService } from '../audit/audit.service';
+import { entered } from '../audit/changes';
+import { waterAnalysisWords } from '../audit/field-words';
 import type { CurrentUser } from '../common/current-user';
+import { dayInWords } from '../common/day-in-words';
 import { IdempotencyService } from '../common/idempotency.service';
 import { InputInvalid } from '../common/request-errors';
 import { TransactionsService } from '../common/transactions.service';
@@ -68,7 +77,7 @@ export class WaterService {
         await this.audit.record(transaction, {
           user,
           act: 'water-source-entered',
-          sentence: `${user.name} entered the water ${row.name} at ${yard.name}`,
+          sentence: `Entered the water ${row.name} at ${yard.name}`,
           subject: { kind: 'water-source', id: row.uuid, name: row.name },
           yardId: yard.id,
         });
@@ -105,9 +114,14 @@ export class WaterService {
       await this.audit.record(transaction, {
         user,
         act: 'water-analysis-entered',
-        sentence: `${user.name} entered an analysis of ${source.name} sampled on ${input.sampledOn}`,
+        sentence: `Entered an analysis of ${source.name}, sampled on ${dayInWords(input.sampledOn)}`,
         subject: { kind: 'water-analysis', id: row.uuid, name: source.name },
         yardId: source.yardId,
+        changes: entered(waterAnalysisWords, {
+          ...input,
+          sulfate: figureInWords(input.sulfate),
+          nitrate: figureInWords(input.nitrate),
+        }),
       });
       return toWaterAnalysisView(row, source, user.name);
     });
@@ -129,4 +143,11 @@ export class WaterService {
       ],
     });
   }
+}
+
+/** As the laboratory printed it: "< 5 mg/L as SO4". */
+function figureInWords(figure: WaterAnalysisInput['sulfate'] | WaterAnalysisInput['nitrate']): string | null {
+  if (figure === null) return null;
+  const { value, unit, qualifier } = figure;
+  return `${qualifier === null ? '' : `${qualifier} `}${displayNumber(value)} ${unit} as ${figure.as}`;
 }

@@ -3,7 +3,8 @@ import { InjectModel } from '@nestjs/sequelize';
 import type { YardInput, YardView } from '@brimgate/rules';
 import type { Transaction } from 'sequelize';
 import { AuditService } from '../audit/audit.service';
-import { changesBetween } from '../common/changes';
+import { changesBetween } from '../audit/changes';
+import { yardWords } from '../audit/field-words';
 import type { CurrentUser } from '../common/current-user';
 import { TransactionsService } from '../common/transactions.service';
 import { DUPLICATE_KEY, errorNumber } from '../database/error-number';
@@ -56,12 +57,12 @@ export class YardsService {
   }): Promise<YardView> {
     return this.transactions.run(async (transaction) => {
       const row = await this.find(uuid, user, transaction);
-      const changes = changesBetween(row.get({ plain: true }) as Record<string, unknown>, input);
+      const changes = changesBetween(yardWords, row.get({ plain: true }) as Record<string, unknown>, input);
       await this.save(row, input, version, transaction);
       await this.audit.record(transaction, {
         user,
         act: 'yard-changed',
-        sentence: `${user.name} changed the settings of ${row.name}`,
+        sentence: `Changed the settings of ${row.name}`,
         subject: { kind: 'yard', id: row.uuid, name: input.name },
         yardId: row.id,
         changes,

@@ -9,11 +9,11 @@ export const AuditEventView = v.strictObject({
   role: v.string(),
   /** What was done, past tense and kebab-case: `ration-released`. */
   act: v.string(),
-  /** The same as a sentence. */
+  /** The same as a sentence that begins with the deed: the person stands beside it. */
   sentence: v.string(),
   subject: v.strictObject({ kind: v.string(), id: v.string(), name: v.string() }),
   yard: v.nullable(v.string()),
-  /** Old and new values of what changed. */
+  /** What changed, in the trade's words; `before` is null for what was told beside an act, such as its reason. */
   changes: v.array(
     v.strictObject({ field: v.string(), before: v.nullable(v.string()), after: v.nullable(v.string()) }),
   ),

@@ -1,4 +1,5 @@
 import type { ReferenceTables } from '@brimgate/reference-tables';
+import { citedInWords } from '../quantities/cited-in-words';
 import type { Diet } from '../rations/diet';
 import type { CattleInput } from '../screenings/screening-request.schema';
 import type { ExcretionEstimate } from '../screenings/screening.schema';
@@ -60,7 +61,7 @@ function retainedKgPerDay({ cattle, retention, daysOnFeed, tables }: DailyBalanc
       nitrogen: 0,
       phosphorus: 0,
       assumptions: [
-        `A dry cow was taken to keep nothing of what she eats (${share.status}); the calf she carries is left out.`,
+        `A dry cow was taken to keep nothing of what she eats (${citedInWords(share)}); the calf she carries is left out.`,
       ],
     };
   }

@@ -1,5 +1,6 @@
 import { NEWEST_EDITION, tablesOf, type ReferenceTables } from '@brimgate/reference-tables';
 import type { CattleInput } from '../screenings/screening-request.schema';
+import { citedInWords } from '../quantities/cited-in-words';
 import { nitrogenRetainedKg } from './nitrogen';
 import { phosphorusRetainedKg } from './phosphorus';
 import { hasPositiveGain, type FinishedAnimal } from './retention';
@@ -42,7 +43,7 @@ export function finishedAnimalOf(cattle: CattleInput, tables: ReferenceTables): 
   }
   const reference = tables.excretion.finishedHead.constants.defaultStandardReferenceWeightKg;
   const standardReferenceWeightKg = cattle.standardReferenceWeightKg ?? reference.value;
-  const said = `A standard reference weight of ${reference.value} kg was taken (${reference.sourceId}, ${reference.status}).`;
+  const said = `No standard reference weight was stated, so ${reference.value} kg was taken (${citedInWords(reference)}).`;
   return {
     animal: { entryWeightKg, exitWeightKg, daysOnFeed, standardReferenceWeightKg },
     missing: [],

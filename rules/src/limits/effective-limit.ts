@@ -1,4 +1,5 @@
 import type { LimitRow, LimitTable, ValueStatus } from '@brimgate/reference-tables';
+import { displayNumber } from '../quantities/display-number';
 import type { OwnLimit } from '../screenings/own-limits.schema';
 import type { FindingMarker } from '../screenings/screening.schema';
 
@@ -78,8 +79,13 @@ function describeOwn(
 ): string {
   const kind = isLooser ? 'looser' : 'no looser';
   const reason = own.reason === undefined ? '' : ` Reason given: ${own.reason}`;
-  const cap = held === own.value ? '' : ` It was held to ${held}, above which the heaviest grade always counts.`;
-  return `An own limit of ${own.value} stands for ${table.title.toLowerCase()}, ${kind} than the published one.${cap}${reason}`;
+  const cap =
+    held === own.value ? '' : ` It was held to ${withUnit(held, table)}, above which the heaviest grade always counts.`;
+  return `An own limit of ${withUnit(own.value, table)} stands for ${table.title.toLowerCase()}, ${kind} than the published one.${cap}${reason}`;
 }
+
+/** A ratio's unit is part of its number: "1.2:1". */
+const withUnit = (value: number, { unit }: LimitTable): string =>
+  `${displayNumber(value)}${unit.startsWith(':') ? '' : ' '}${unit}`;
 
 export const lowerFirst = (text: string): string => text.charAt(0).toLowerCase() + text.slice(1);

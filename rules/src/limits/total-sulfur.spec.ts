@@ -129,6 +129,9 @@ describe('total sulfur', () => {
   it('holds a looser own limit with its reason and source, but never past the 0.50 grade', () => {
     const limits = { 'total-sulfur': { value: 0.6, reason: 'Fed so for years', source: 'Trial of the firm' } };
     expect(sulfurOf({ ...fed(0.45), limits })).toMatchObject({ status: 'near', limit: 0.5 });
+    expect(sulfurOf({ ...fed(0.45), limits }).assumptions.join()).toMatch(
+      /An own limit of 0\.6 % of DM stands for total sulfur.* It was held to 0\.5 % of DM/,
+    );
     expect(sulfurOf({ ...fed(0.51), limits })).toMatchObject({
       status: 'over',
       signOff: 'veterinarian',

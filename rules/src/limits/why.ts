@@ -1,5 +1,5 @@
 import type { LimitTable } from '@brimgate/reference-tables';
-import { displayBeside, displayNumber } from '../quantities/display-number';
+import { displayNumber, readingBeside, readingNumber } from '../quantities/display-number';
 import type { ScreeningRequest } from '../screenings/screening-request.schema';
 import type { EffectiveLimit } from './effective-limit';
 import type { Judgement } from './judgement';
@@ -32,7 +32,7 @@ const boundWord = ({ table }: WhyFacts): string => (table.direction === 'max' ? 
 function found(facts: WhyFacts): string {
   const { subject, table, limit, measured, judgement } = facts;
   const isMax = table.direction === 'max';
-  const show = (value: number) => withUnit(displayBeside(value, limit.value), table.unit);
+  const show = (value: number) => withUnit(readingBeside(value, limit.value), table.unit);
   const bound = `the ${boundWord(facts)} of ${limitWords(facts)}`;
   if (measured.value === null) {
     const known = isMax ? `at least ${show(measured.atLeast)}` : `at most ${show(measured.atMost)}`;
@@ -56,7 +56,7 @@ function gradeWords({ judgement, table }: WhyFacts): string {
 function mostOfIt({ measured, judgement, table }: WhyFacts): string {
   if (judgement.status === 'within' || measured.contributors.length < 2 || table.direction === 'min') return '';
   const largest = [...measured.contributors].sort((one, other) => other.value - one.value).slice(0, 2);
-  return ` Most of it: ${joinWords(largest.map((part) => `${part.name} ${displayNumber(part.value)}`))}.`;
+  return ` Most of it: ${joinWords(largest.map((part) => `${part.name} ${readingNumber(part.value)}`))}.`;
 }
 
 function undetermined(facts: WhyFacts): string {
@@ -65,7 +65,7 @@ function undetermined(facts: WhyFacts): string {
     measured.missing.length > 0 ? `missing: ${listMissing(measured.missing, request)}` : 'it cannot be formed';
   const floor =
     table.direction === 'max' && measured.atLeast > 0
-      ? ` What is known comes to at least ${withUnit(displayNumber(measured.atLeast), table.unit)} of`
+      ? ` What is known comes to at least ${withUnit(readingNumber(measured.atLeast), table.unit)}, beside`
       : ' It is held against';
-  return `${subject} is not determined; ${missing}.${floor} the ${boundWord(facts)} ${limitWords(facts)}.`;
+  return `${subject} is not determined; ${missing}.${floor} the ${boundWord(facts)} of ${limitWords(facts)}.`;
 }

@@ -9,6 +9,12 @@ const WeightKg = v.pipe(
   v.maxValue(1500, 'Above 1,500 kg: is this in pounds?'),
 );
 
+/** As long as a ration may be said to be fed; a longer lot is a slipped year. */
+const MOST_DAYS_ON_FEED = 1095;
+const MS_PER_DAY = 86_400_000;
+
+const daysBetween = (from: string, to: string): number => (Date.parse(to) - Date.parse(from)) / MS_PER_DAY;
+
 export const LotInput = v.pipe(
   v.strictObject({
     yardId: Id,
@@ -41,6 +47,14 @@ export const LotInput = v.pipe(
       [['startedOn'], ['endedOn']],
       (lot) => lot.endedOn === null || lot.endedOn > lot.startedOn,
       'The lot ends after it starts',
+    ),
+    ['endedOn'],
+  ),
+  v.forward(
+    v.partialCheck(
+      [['startedOn'], ['endedOn']],
+      (lot) => lot.endedOn === null || daysBetween(lot.startedOn, lot.endedOn) <= MOST_DAYS_ON_FEED,
+      'More than three years on feed: check the dates',
     ),
     ['endedOn'],
   ),

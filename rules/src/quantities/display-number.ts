@@ -17,6 +17,23 @@ export function displayBeside(value: number, limit: number): string {
   return displayNumber(value);
 }
 
+/** A number inside a sentence: two decimals below ten, one below a hundred, none above; no trailing zeros. */
+export function readingNumber(value: number): string {
+  const short = shortened(value);
+  return short === 0 ? displayNumber(value) : withThousands(short);
+}
+
+/** The same beside a limit: more decimals where fewer would hide on which side of the limit the value lies. */
+export function readingBeside(value: number, limit: number): string {
+  const isTold = value === limit || Math.sign(shortened(value) - limit) === Math.sign(value - limit);
+  return isTold ? readingNumber(value) : displayBeside(value, limit);
+}
+
+function shortened(value: number): number {
+  const size = Math.abs(value);
+  return Number(value.toFixed(size >= 100 ? 0 : size >= 10 ? 1 : 2));
+}
+
 function withThousands(value: number): string {
   const [whole = '0', fraction] = String(value).split('.');
   const grouped = whole.replace(/\B(?=(\d{3})+(?!\d))/g, ',');

@@ -1,5 +1,6 @@
 import type { ReferenceTables } from '@brimgate/reference-tables';
 import { exactly, unknown, type BoundedQuantity } from '../quantities/bounded-quantity';
+import { citedInWords } from '../quantities/cited-in-words';
 import { displayNumber } from '../quantities/display-number';
 import type { CattleInput } from '../screenings/screening-request.schema';
 
@@ -44,9 +45,9 @@ function predicted(cattle: CattleInput, tables: ReferenceTables): Intake {
   return {
     quantity: exactly(intake),
     assumptions: [
-      `Dry matter intake was predicted, not measured: ${interceptKgPerDay.value} + ${perInitialBodyWeightKg.value} × ` +
-        `${displayNumber(initialWeightKg)} kg (${weight}) = ${displayNumber(intake)} kg per head and day ` +
-        `(${interceptKgPerDay.sourceId}, ${interceptKgPerDay.status}); pens differ from it by 15 % and more.`,
+      `Dry matter intake was predicted, not measured: ${displayNumber(intake)} kg per head and day, from ` +
+        `${interceptKgPerDay.value} kg + ${perInitialBodyWeightKg.value} × ${displayNumber(initialWeightKg)} kg, ${weight} ` +
+        `(${citedInWords(interceptKgPerDay)}); pens differ from it by 15 % and more.`,
     ],
   };
 }

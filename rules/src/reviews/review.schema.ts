@@ -1,5 +1,6 @@
 import * as v from 'valibot';
 import { ContentHash, Id, Instant, Reason, Reference } from '../common/wire.schema';
+import { oneLineOf } from '../common/typed-text';
 import { ScreeningView } from '../screenings/screening-view.schema';
 import { GateView } from './release-gate.schema';
 
@@ -19,7 +20,7 @@ export type ReviewInput = v.InferOutput<typeof ReviewInput>;
 
 const Condition = v.pipe(
   v.string('Write the condition'),
-  v.trim(),
+  v.transform(oneLineOf),
   v.minLength(5, 'Say the condition in at least 5 characters'),
   v.maxLength(300, 'Keep a condition within 300 characters'),
 );

@@ -1,5 +1,6 @@
 import type { ReferenceTables, WaterIntakeByClass, WaterIntakeEquation } from '@brimgate/reference-tables';
 import { between, exactly, joinMissing, unknown, type BoundedQuantity } from '../quantities/bounded-quantity';
+import { citedInWords } from '../quantities/cited-in-words';
 import { displayNumber } from '../quantities/display-number';
 import type { CattleInput, RationLineInput } from '../screenings/screening-request.schema';
 import type { WaterIntakeClass, WaterIntakeInput } from '../screenings/water-facts.schema';
@@ -45,13 +46,20 @@ function fromTable(input: TableInput, drinkers: Drinkers): DrinkingWater {
     ? between({ atLeast: water.litresPerDay, atMost: Infinity }, ['waterIntake.litresPerDay'])
     : exactly(water.litresPerDay);
   const said =
-    `Water intake was estimated, not measured: ${displayNumber(water.litresPerDay)} L of water per head and day for the class ` +
-    `${cattleClass} at ${displayNumber(at.bodyWeightKg)} kg and ${displayNumber(at.temperatureC)} °C ` +
-    `(${table.title.toLowerCase()}, ${statusOf(table)}).`;
+    `Water intake was estimated, not measured: ${displayNumber(water.litresPerDay)} L per head and day of ` +
+    `${table.basis} for ${classWords(table, cattleClass)} of ${displayNumber(at.bodyWeightKg)} kg at ` +
+    `${displayNumber(at.temperatureC)} °C (${tableCited(table)}).`;
   return lessFeedMoisture({ quantity, assumptions: [said, ...water.notes] }, table.basis, drinkers);
 }
 
-const statusOf = (table: WaterIntakeByClass): string => table.classes[0]?.rows[0]?.status ?? 'memory';
+const classWords = (table: WaterIntakeByClass, id: WaterIntakeClass): string =>
+  table.classes.find((waterClass) => waterClass.id === id)?.title.toLowerCase() ?? id;
+
+/** The table was taken from one document as a whole: its first row speaks for all. */
+function tableCited({ classes, title }: WaterIntakeByClass): string {
+  const row = classes[0]?.rows[0];
+  return row ? citedInWords(row) : title;
+}
 
 function classOf(cattle: CattleInput): WaterIntakeClass {
   if (cattle.sex === 'bull') return 'bull';
@@ -63,15 +71,15 @@ function classOf(cattle: CattleInput): WaterIntakeClass {
 function fromEquation(input: EquationInput, drinkers: Drinkers): DrinkingWater {
   const equation = drinkers.tables.waterIntake[input.model];
   if (drinkers.cattle.stage !== 'finishing') {
-    throw new WaterIntakeOutOfRange('cattle.stage', `${input.model} was fitted to finishing cattle only`);
+    throw new WaterIntakeOutOfRange('cattle.stage', 'the equation was fitted to finishing cattle only');
   }
   const intake = drinkers.dryMatterIntakeKgPerDay;
   if (intake.value === null) return { quantity: unknown(intake.missing), assumptions: [] };
   const litres = equationWaterLitresPerDay(equation, input, intake.value);
-  if (litres < 0) throw new WaterIntakeOutOfRange('waterIntake', `${input.model} gives less than no water here`);
+  if (litres < 0) throw new WaterIntakeOutOfRange('waterIntake', 'the equation gives less than no water here');
   const said =
-    `Water intake was estimated, not measured: ${displayNumber(litres)} L per head and day by ${input.model} ` +
-    `(${equation.title.toLowerCase()}, ${equation.status}).`;
+    `Water intake was estimated, not measured: ${displayNumber(litres)} L per head and day of ${equation.basis} ` +
+    `(${citedInWords(equation)}).`;
   return lessFeedMoisture({ quantity: exactly(litres), assumptions: [said] }, equation.basis, drinkers);
 }
 
@@ -122,7 +130,7 @@ function lessFeedMoisture(total: DrinkingWater, basis: WaterIntakeByClass['basis
     total.quantity.value === null
       ? between({ atLeast: less(total.quantity.atLeast), atMost: total.quantity.atMost }, paths)
       : exactly(less(total.quantity.value));
-  const said = `${displayNumber(moistureKg)} kg of it comes with the moisture of the feed; the rest is drunk.`;
+  const said = `Of that water ${displayNumber(moistureKg)} kg comes with the moisture of the feed; the rest is drunk.`;
   return { quantity, assumptions: [...total.assumptions, said] };
 }
 

@@ -7,7 +7,7 @@ export const NitrateSpecies = v.picklist(['NO3', 'NO3-N'], 'Say whether the figu
 /** mg/L and ppm are the same in water; both are kept as the laboratory printed them. */
 export const WaterUnit = v.picklist(['mg/L', 'ppm'], 'The unit is mg/L or ppm');
 /** `<` when the laboratory found less than it can measure. */
-export const Qualifier = v.nullable(v.picklist(['<']));
+export const Qualifier = v.nullable(v.picklist(['<'], 'The sign is < or left out'));
 
 /** Above 100,000 mg/L it is brine, not drinking water: a slipped decimal. */
 const MgPerL = v.pipe(

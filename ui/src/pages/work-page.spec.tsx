@@ -49,7 +49,7 @@ describe('the work page', () => {
     ]);
     expect(await screen.findByRole('heading', { name: 'Waiting for others, 12' })).toBeInTheDocument();
     expect(screen.getByText('and 11 more')).toBeInTheDocument();
-    expect(screen.queryByRole('heading', { name: /Drafts/ })).not.toBeInTheDocument();
+    expect(screen.queryByRole('heading', { name: /In hand/ })).not.toBeInTheDocument();
   });
 
   it.each([

@@ -1,4 +1,5 @@
 import { type LimitTable, NEWEST_EDITION, ruleIds, sources, tablesOf } from '@brimgate/reference-tables';
+import { displayNumber } from '@brimgate/rules';
 import { DataTable } from '../../components/data-table';
 import { ProvenanceTag } from '../../components/provenance-tag';
 import { type LimitLine, limitLines } from './limit-lines';
@@ -35,7 +36,7 @@ function OneLimit({ limit }: { limit: LimitTable }) {
           columns={[
             { key: 'label', header: 'Where it holds', isRowHeader: true, cell: (line) => line.label },
             { key: 'kind', header: 'What it is', cell: (line) => kindWords[line.kind] },
-            { key: 'value', header: 'Value', unit: limit.unit, align: 'number', cell: (line) => String(line.value) },
+            { key: 'value', header: 'Value', unit: limit.unit, align: 'number', cell: (line) => displayNumber(line.value) },
             {
               key: 'status',
               header: 'How it is known',

@@ -4,9 +4,9 @@ import type { Role, WorkGroup } from '@brimgate/rules';
 export const groupWords: Readonly<Record<WorkGroup['key'], { title: string; aside: string }>> = {
   'to-sign': { title: 'To sign', aside: 'oldest first' },
   'sent-back': { title: 'Sent back to you', aside: 'with a reason' },
-  'ready-to-release': { title: 'Ready to release', aside: 'nothing waits for anybody else' },
+  'ready-to-release': { title: 'Ready to release', aside: 'waits for nobody else' },
   'waiting-for-others': { title: 'Waiting for others', aside: 'in review' },
-  drafts: { title: 'Drafts', aside: 'not screened, or changed since' },
+  drafts: { title: 'In hand', aside: 'neither sent for review nor released' },
   'to-acknowledge': { title: 'To acknowledge', aside: 'advisories for your yard' },
   'mail-not-delivered': { title: 'Mail that did not arrive', aside: 'parked or waiting for another try' },
   'lots-incomplete': { title: 'Lots with something missing', aside: 'their excretion is not determined' },
