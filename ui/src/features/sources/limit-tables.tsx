@@ -36,7 +36,13 @@ function OneLimit({ limit }: { limit: LimitTable }) {
           columns={[
             { key: 'label', header: 'Where it holds', isRowHeader: true, cell: (line) => line.label },
             { key: 'kind', header: 'What it is', cell: (line) => kindWords[line.kind] },
-            { key: 'value', header: 'Value', unit: limit.unit, align: 'number', cell: (line) => displayNumber(line.value) },
+            {
+              key: 'value',
+              header: 'Value',
+              unit: limit.unit,
+              align: 'number',
+              cell: (line) => displayNumber(line.value),
+            },
             {
               key: 'status',
               header: 'How it is known',
