@@ -6,7 +6,7 @@ import { SelectField } from '../../components/select-field';
 import { TextField } from '../../components/text-field';
 import { useYardZone } from '../../lib/session';
 import { type LotFormValues, lotFieldLabels } from './lot-form-values';
-import styles from './lot-form.module.css';
+import styles from '../../components/grouped-form.module.css';
 import { fedReleasesQuery } from './lots.queries';
 import { releaseChoices } from './release-choice';
 

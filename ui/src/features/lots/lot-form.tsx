@@ -8,7 +8,7 @@ import { isApiProblem, problemOf } from '../../lib/api-problem';
 import { type Fault, faultsOfForm, faultsToForm } from '../../lib/form/faults-to-form';
 import { LotFeedingFields, LotIdentityFields, LotWeightFields } from './lot-fields';
 import { emptyLotForm, type LotFormValues, lotFieldLabels, lotFormOf, lotResolver } from './lot-form-values';
-import styles from './lot-form.module.css';
+import styles from '../../components/grouped-form.module.css';
 import { useLotConflict, useLotSave } from './lots.queries';
 
 interface LotFormProps {

@@ -4,7 +4,7 @@ import { NumberField } from '../../components/number-field';
 import { SelectField } from '../../components/select-field';
 import { TextField } from '../../components/text-field';
 import { timeZoneChoices, yardFieldLabels, type YardFormValues } from './yard-form-values';
-import styles from './yard-form.module.css';
+import styles from '../../components/grouped-form.module.css';
 
 function useYardField() {
   const { register, formState } = useFormContext<YardFormValues>();

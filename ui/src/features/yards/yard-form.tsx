@@ -10,7 +10,7 @@ import { type Fault, faultsOfForm, faultsToForm } from '../../lib/form/faults-to
 import { usePermission } from '../../lib/session';
 import { YardCapFields, YardGateFields, YardPlaceFields } from './yard-fields';
 import { yardFieldLabels, yardFormOf, type YardFormValues, yardResolver } from './yard-form-values';
-import styles from './yard-form.module.css';
+import styles from '../../components/grouped-form.module.css';
 import { useYardConflict, useYardSave } from './yards.queries';
 
 /** The settings of a yard; everybody who reads yards sees them, an administrator changes them. */
