@@ -9,8 +9,8 @@ export const grainsAsAnalysed: readonly [box: string, typed: string][] = [
   ['NPN, as protein equivalent, % of DM', '0'],
   ['Urea, % of DM', '0'],
   ['Fat, % of DM', '10'],
-  ['of it added as fat or oil, % of DM', '0'],
-  ['of it from solubles fed as such, % of DM', '0'],
+  ['Fat added as fat or oil, % of DM', '0'],
+  ['Fat from solubles fed as such, % of DM', '0'],
   // As a laboratory of another country prints it.
   ['Sulfur, % of DM', '0,70'],
   ['Phosphorus, % of DM', '0.80'],

@@ -1,4 +1,4 @@
-import type { NutrientName } from '@brimgate/rules';
+import { type NutrientName, nutrientWords } from '@brimgate/rules';
 
 export interface Nutrient {
   label: string;
@@ -6,31 +6,32 @@ export interface Nutrient {
   decimals: number;
 }
 
-const pctDm = (label: string, decimals = 2): Nutrient => ({ label, unit: '% of DM', decimals });
-const mgPerKgDm = (label: string): Nutrient => ({ label, unit: 'mg/kg DM', decimals: 1 });
-const energy = (label: string): Nutrient => ({ label, unit: 'Mcal/kg DM', decimals: 2 });
+function shown(name: NutrientName, decimals: number): Nutrient {
+  const { label, unit } = nutrientWords[name];
+  return { label: label.charAt(0).toUpperCase() + label.slice(1), unit, decimals };
+}
 
-/** What each figure of a composition is called, and its unit and basis. */
+/** What each figure of a composition is called, its unit and basis, and how many decimals it is shown with. */
 export const nutrients: Readonly<Record<NutrientName, Nutrient>> = {
-  dryMatterPctAsFed: { label: 'Dry matter', unit: '% as fed', decimals: 1 },
-  roughageSharePctDm: pctDm('Roughage share', 0),
-  crudeProteinPctDm: pctDm('Crude protein', 1),
-  npnProteinEquivalentPctDm: pctDm('NPN, as protein equivalent', 1),
-  ureaPctDm: pctDm('Urea'),
-  rumenDegradableProteinPctCp: { label: 'Rumen-degradable protein', unit: '% of CP', decimals: 0 },
-  fatPctDm: pctDm('Fat', 1),
-  addedFatPctDm: pctDm('of it added as fat or oil', 1),
-  solublesFatPctDm: pctDm('of it from solubles fed as such', 1),
-  sulfurPctDm: pctDm('Sulfur', 3),
-  phosphorusPctDm: pctDm('Phosphorus', 3),
-  calciumPctDm: pctDm('Calcium', 3),
-  potassiumPctDm: pctDm('Potassium'),
-  magnesiumPctDm: pctDm('Magnesium', 3),
-  ndfPctDm: pctDm('NDF', 1),
-  tdnPctDm: pctDm('TDN', 1),
-  netEnergyMaintenanceMcalPerKgDm: energy('Net energy, maintenance'),
-  netEnergyGainMcalPerKgDm: energy('Net energy, gain'),
-  copperMgPerKgDm: mgPerKgDm('Copper'),
-  molybdenumMgPerKgDm: mgPerKgDm('Molybdenum'),
-  nitrateNitrogenMgPerKgDm: mgPerKgDm('Nitrate nitrogen'),
+  dryMatterPctAsFed: shown('dryMatterPctAsFed', 1),
+  roughageSharePctDm: shown('roughageSharePctDm', 0),
+  crudeProteinPctDm: shown('crudeProteinPctDm', 1),
+  npnProteinEquivalentPctDm: shown('npnProteinEquivalentPctDm', 1),
+  ureaPctDm: shown('ureaPctDm', 2),
+  rumenDegradableProteinPctCp: shown('rumenDegradableProteinPctCp', 0),
+  fatPctDm: shown('fatPctDm', 1),
+  addedFatPctDm: shown('addedFatPctDm', 1),
+  solublesFatPctDm: shown('solublesFatPctDm', 1),
+  sulfurPctDm: shown('sulfurPctDm', 3),
+  phosphorusPctDm: shown('phosphorusPctDm', 3),
+  calciumPctDm: shown('calciumPctDm', 3),
+  potassiumPctDm: shown('potassiumPctDm', 2),
+  magnesiumPctDm: shown('magnesiumPctDm', 3),
+  ndfPctDm: shown('ndfPctDm', 1),
+  tdnPctDm: shown('tdnPctDm', 1),
+  netEnergyMaintenanceMcalPerKgDm: shown('netEnergyMaintenanceMcalPerKgDm', 2),
+  netEnergyGainMcalPerKgDm: shown('netEnergyGainMcalPerKgDm', 2),
+  copperMgPerKgDm: shown('copperMgPerKgDm', 1),
+  molybdenumMgPerKgDm: shown('molybdenumMgPerKgDm', 1),
+  nitrateNitrogenMgPerKgDm: shown('nitrateNitrogenMgPerKgDm', 1),
 };
