@@ -194,7 +194,7 @@ const acknowledge = (browser: Browser) =>
  */
 const expected: readonly [column: string, value: number][] = [
   ['Head', 100],
-  ['Days on feed, d', 150],
+  ['Days on feed', 150],
   ['N intake, kg per head', 36.48],
   ['N retained, kg per head', 4.4807],
   ['N excreted, kg per head', 31.9993],
