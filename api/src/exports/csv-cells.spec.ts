@@ -17,6 +17,9 @@ describe('a cell of a CSV file', () => {
     [-1e-7, '-1e-7'],
     [0, '0'],
     [1234.5, '1234.5'],
+    // 0.1 + 0.2 in binary
+    [0.1 + 0.2, '0.3'],
+    [1234567.25, '1234567.25'],
   ])('leaves the number %d a number', (number, expected) => {
     expect(csvCell(number)).toBe(expected);
   });
